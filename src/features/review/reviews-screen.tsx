@@ -1,0 +1,4 @@
+/** The reviews a person takes part in. */
+export function ReviewsScreen() {
+  return <p className="p-4">Opening</p>;
+}
