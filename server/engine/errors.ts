@@ -46,7 +46,8 @@ export function requireInRange(
   unit = "",
   index?: number,
 ): number {
-  if (!Number.isFinite(value)) throw new EngineInputError({ quantity, value, reason: "notFinite", unit, index });
+  if (!Number.isFinite(value))
+    throw new EngineInputError({ quantity, value, reason: "notFinite", unit, index });
   if (value < min || value > max) {
     throw new EngineInputError({ quantity, value, reason: "range", min, max, unit, index });
   }
