@@ -40,7 +40,9 @@ export function BuildingOutline({ shapeType, outline, size, status, label }: Bui
       viewBox={`0 0 ${size.width} ${size.height}`}
       className={status === "short" ? "text-redlead" : undefined}
       style={{ flex: "none" }}
-      {...(label ? { role: "img", "aria-label": label } : { "aria-hidden": true })}
+      role={label ? "img" : "presentation"}
+      aria-label={label}
+      aria-hidden={label === undefined}
     >
       {drawable && first && last ? (
         <g
