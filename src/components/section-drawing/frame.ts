@@ -66,15 +66,20 @@ export function roofAt(points: OutlinePoint[], x: number): { point: OutlinePoint
   return { point: { x, y: Math.max(...points.map((p) => p.y)) }, out: { x: 0, y: 1 } };
 }
 
-/** The outline moved inwards by a distance in metres; the feet stay on the ground. */
+/** The outline moved inwards by a distance in metres, parallel to itself; the feet stay on the ground. */
 export function innerLine(points: OutlinePoint[], insetM: number): OutlinePoint[] {
   const last = points.length - 1;
+  const inward = (from: OutlinePoint, to: OutlinePoint): OutlinePoint => {
+    const length = Math.hypot(to.x - from.x, to.y - from.y) || 1;
+    return { x: (to.y - from.y) / length, y: -(to.x - from.x) / length };
+  };
   return points.map((p, i) => {
     if (i === 0) return { x: p.x + insetM, y: 0 };
     if (i === last) return { x: p.x - insetM, y: 0 };
-    const a = points[i - 1] ?? p;
-    const b = points[i + 1] ?? p;
-    const length = Math.hypot(b.x - a.x, b.y - a.y) || 1;
-    return { x: p.x + ((b.y - a.y) / length) * insetM, y: p.y - ((b.x - a.x) / length) * insetM };
+    const before = inward(points[i - 1] ?? p, p);
+    const after = inward(p, points[i + 1] ?? p);
+    const spread = 1 + before.x * after.x + before.y * after.y;
+    const reach = insetM / Math.max(0.4, spread);
+    return { x: p.x + (before.x + after.x) * reach, y: p.y + (before.y + after.y) * reach };
   });
 }

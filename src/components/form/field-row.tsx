@@ -1,0 +1,40 @@
+import type { ReactNode } from "react";
+
+interface FieldRowProps {
+  label: ReactNode;
+  hint?: ReactNode;
+  /** A sentence; its line is kept free so that nothing jumps when it appears. */
+  error?: string;
+  errorId: string;
+  hintId: string;
+  control: ReactNode;
+  origin?: ReactNode;
+  active?: boolean;
+}
+
+/** One question: words at the left, the control, and where the answer came from. */
+export function FieldRow({ label, hint, error, errorId, hintId, control, origin, active }: FieldRowProps) {
+  return (
+    <div
+      className={`grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 border-b border-rule px-4 pt-2 md:grid-cols-[minmax(0,1fr)_250px_112px] md:px-0 ${active ? "bg-sheet" : ""}`}
+    >
+      <div className={active ? "font-bold" : ""}>
+        {label}
+        {hint ? (
+          <span id={hintId} className="block text-xs font-normal text-ink-2">
+            {hint}
+          </span>
+        ) : null}
+      </div>
+      <div className="w-[216px] md:w-auto">{control}</div>
+      <div className="max-md:col-start-2 max-md:justify-self-end">{origin}</div>
+      <p
+        id={errorId}
+        aria-live="polite"
+        className="col-span-full min-h-[18px] pb-1 text-right text-xs font-medium text-redlead md:pr-[124px]"
+      >
+        {error ?? ""}
+      </p>
+    </div>
+  );
+}
