@@ -1,0 +1,193 @@
+import {
+  Area,
+  CartesianGrid,
+  ComposedChart,
+  Line,
+  ReferenceDot,
+  ReferenceLine,
+  ResponsiveContainer,
+  XAxis,
+  YAxis,
+} from "recharts";
+import { monthShort, number } from "../../lib/format.ts";
+import { hatch } from "../section-drawing/hatches.tsx";
+import { niceTop } from "./nice-top.ts";
+
+export interface NeedSteps {
+  /** Need of each month on the rarer night and on the everyday night, in the reader's unit. */
+  onceInYears: number[];
+  everyday: number[];
+  installed: number;
+  proposed: number | null;
+}
+
+interface NeedStepsProps {
+  data: NeedSteps;
+  unit: string;
+  installedWords: string;
+  proposedWords: string | null;
+  height?: number;
+}
+
+const words = { fill: "var(--color-ink)", fontSize: 13, fontWeight: 650 };
+
+/** Month by month, what the cold night asks for against what is fitted. The missing part is hatched. */
+export function NeedStepsChart({ data, unit, installedWords, proposedWords, height = 330 }: NeedStepsProps) {
+  const { onceInYears, everyday, installed, proposed } = data;
+  const edges = [...onceInYears.keys(), onceInYears.length];
+  const rows = edges.map((edge) => {
+    const need = onceInYears[Math.min(edge, 11)] ?? 0;
+    return {
+      edge,
+      need,
+      everyday: everyday[Math.min(edge, 11)] ?? 0,
+      short: need > installed ? [installed, need] : [installed, installed],
+    };
+  });
+  const top = niceTop(Math.max(...onceInYears, ...everyday, installed, proposed ?? 0));
+  const worst = onceInYears.indexOf(Math.max(...onceInYears));
+  const worstShort = (onceInYears[worst] ?? 0) - installed;
+  const decimals = top < 20 ? 1 : 0;
+  return (
+    <ResponsiveContainer width="100%" height={height}>
+      <ComposedChart
+        data={rows}
+        margin={{ top: 12, right: 6, bottom: 0, left: 0 }}
+        accessibilityLayer={false}
+      >
+        <CartesianGrid vertical={false} stroke="var(--color-rule)" />
+        <XAxis
+          dataKey="edge"
+          type="number"
+          domain={[0, 12]}
+          ticks={monthShort.map((_, i) => i + 0.5)}
+          tickFormatter={(value: number) => monthShort[Math.floor(value)] ?? ""}
+          tickLine={false}
+          axisLine={{ stroke: "var(--color-rule-strong)" }}
+          tick={{ fill: "var(--color-ink)", fontSize: 13 }}
+          interval="preserveStartEnd"
+        />
+        <YAxis
+          width={52}
+          domain={[0, top]}
+          tickCount={6}
+          tickLine={false}
+          axisLine={false}
+          tick={{ fill: "var(--color-ink)", fontSize: 13 }}
+          tickFormatter={(value: number) => number(value, top < 5 ? 1 : 0)}
+        />
+        <Area
+          type="stepAfter"
+          dataKey="need"
+          stroke="none"
+          fill="var(--color-trough)"
+          fillOpacity={1}
+          isAnimationActive={false}
+          activeDot={false}
+        />
+        {worstShort > 0 ? (
+          <Area
+            type="stepAfter"
+            dataKey="short"
+            stroke="none"
+            fill={hatch("short")}
+            fillOpacity={1}
+            isAnimationActive={false}
+            activeDot={false}
+          />
+        ) : null}
+        <Line
+          type="stepAfter"
+          dataKey="everyday"
+          stroke="var(--color-ink-2)"
+          strokeWidth={1.6}
+          strokeDasharray="2 3"
+          dot={false}
+          isAnimationActive={false}
+          activeDot={false}
+        />
+        <Line
+          type="stepAfter"
+          dataKey="need"
+          stroke="var(--color-ink)"
+          strokeWidth={2.6}
+          dot={false}
+          isAnimationActive={false}
+          activeDot={false}
+        />
+        <ReferenceLine
+          y={installed}
+          stroke="var(--color-redlead)"
+          strokeWidth={2}
+          strokeDasharray="8 4"
+          label={{
+            value: installedWords,
+            position: "insideBottomLeft",
+            offset: 6,
+            ...words,
+            fill: "var(--color-redlead)",
+            dx: 250,
+          }}
+        />
+        {proposed !== null && proposedWords ? (
+          <ReferenceLine
+            y={proposed}
+            stroke="var(--color-bottle)"
+            strokeWidth={2.6}
+            label={{
+              value: proposedWords,
+              position: "insideBottomLeft",
+              ...words,
+              fill: "var(--color-bottle)",
+              dx: 250,
+            }}
+          />
+        ) : null}
+        {onceInYears.map((need, month) => (
+          <ReferenceDot
+            key={monthShort[month]}
+            x={month + 0.5}
+            y={need}
+            r={0}
+            label={{ value: number(need, decimals), position: "top", ...words }}
+          />
+        ))}
+        {worstShort > 0 && installed > 0 ? (
+          <ReferenceDot
+            x={worst + 0.5}
+            y={installed + worstShort / 2}
+            r={0}
+            label={{
+              content: ({ viewBox }) => (
+                <ShortPlate viewBox={viewBox} label={`${number(worstShort, decimals)} ${unit}`} />
+              ),
+            }}
+          />
+        ) : null}
+      </ComposedChart>
+    </ResponsiveContainer>
+  );
+}
+
+/** The worst shortfall, written on its own plate inside the hatching. */
+function ShortPlate({ viewBox, label }: { viewBox?: unknown; label: string }) {
+  const place = viewBox as { x?: number; y?: number } | undefined;
+  if (place?.x === undefined || place.y === undefined) return null;
+  const width = label.length * 8 + 8;
+  const x = Math.max(place.x, 56 + width / 2);
+  return (
+    <g>
+      <rect x={x - width / 2} y={place.y - 12} width={width} height="24" fill="var(--color-sheet)" />
+      <text
+        x={x}
+        y={place.y + 5}
+        textAnchor="middle"
+        fontSize="14"
+        fontWeight="700"
+        fill="var(--color-redlead)"
+      >
+        {label}
+      </text>
+    </g>
+  );
+}
