@@ -1,5 +1,6 @@
 import { useId } from "react";
 import type { Origin } from "../../../server/contracts/quantity.ts";
+import { OriginGlyph } from "./origin-glyph.tsx";
 import { originOrder, originWords } from "./origin-words.ts";
 
 interface OriginSelectProps {
@@ -8,26 +9,6 @@ interface OriginSelectProps {
   value: Origin;
   onChange: (origin: Origin) => void;
   disabled?: boolean;
-}
-
-/** Filled: seen with own eyes. Half filled: told. Empty: assumed. */
-function Mark({ origin }: { origin: Origin }) {
-  const { strength } = originWords[origin];
-  return (
-    <svg width="15" height="15" aria-hidden="true" focusable="false" className="flex-none">
-      <rect
-        x="1"
-        y="1"
-        width="13"
-        height="13"
-        fill="var(--color-sheet)"
-        stroke="var(--color-ink)"
-        strokeWidth="1.5"
-      />
-      {strength === "known" ? <rect x="1" y="1" width="13" height="13" fill="var(--color-ink)" /> : null}
-      {strength === "told" ? <path d="M1 1H14L1 14Z" fill="var(--color-ink)" /> : null}
-    </svg>
-  );
 }
 
 /** Where an answer came from: a mark, a word, and a list to change it. */
@@ -39,7 +20,7 @@ export function OriginSelect({ subject, value, onChange, disabled }: OriginSelec
       <label htmlFor={id} className="sr-only">
         {`Where this came from: ${subject}`}
       </label>
-      <Mark origin={value} />
+      <OriginGlyph origin={value} />
       <span
         aria-hidden="true"
         className={assumed ? "border-b-2 border-dashed border-rule-strong" : "border-b-2 border-transparent"}

@@ -1,0 +1,32 @@
+import type { CoverEntry } from "../../../server/contracts/library.ts";
+import type { Survey } from "../../../server/contracts/survey.ts";
+import type { Contents } from "./contents.tsx";
+import type { Shell } from "./shell.tsx";
+
+const OPAQUE = 0.05;
+
+const animalsByWord: [RegExp, Contents][] = [
+  [/chick|hen|broiler|layer|turkey|poult|pullet|bird|duck|goose/, "birds"],
+  [/pig|sow|swine|farrow|wean|boar|hog/, "pigs"],
+  [/./, "cattle"],
+];
+
+/** What stands in the house, by the library entry it names. */
+export function contentsOf(use: Survey["use"]): Contents {
+  if (use.kind === "greenhouse") return "crop";
+  return animalsByWord.find(([words]) => words.test(use.animal.value))?.[1] ?? "empty";
+}
+
+/** How the envelope of a surveyed house is drawn: true thickness from the layers of its roof cover. */
+export function shellOf(survey: Survey, covers: CoverEntry[] | undefined): Shell {
+  const part =
+    survey.shape.type === "atticBarn" ? (survey.covers.ceiling ?? survey.covers.roof) : survey.covers.roof;
+  const cover = covers?.find((entry) => entry.id === part.cover.value);
+  const thicknessMm = cover?.layers.reduce((sum, layer) => sum + (layer.thicknessMm ?? 0), 0) ?? 0;
+  return {
+    thicknessM: thicknessMm / 1000,
+    insulated: cover ? cover.solarTransmittance < OPAQUE && thicknessMm > 10 : survey.use.kind === "barn",
+    contents: contentsOf(survey.use),
+    screen: survey.screen ? "shut" : null,
+  };
+}
