@@ -95,9 +95,13 @@ function wordsFor(issue: z.core.$ZodIssue, environment: Record<string, string | 
 
 function refuseInProduction(values: z.infer<typeof environmentSchema>): void {
   const problems: string[] = [];
-  if (values.GOOGLE_FAKE_URL !== undefined) problems.push("GOOGLE_FAKE_URL: the sign-in stand-in cannot be used in production");
-  if (values.MAIL_FAKE_URL !== undefined) problems.push("MAIL_FAKE_URL: the mail stand-in cannot be used in production");
-  if (!values.PUBLIC_URL.startsWith("https://")) problems.push("PUBLIC_URL: must start with https:// in production");
-  if (values.DB_PASSWORD.length < 12) problems.push("DB_PASSWORD: must have at least 12 characters in production");
+  if (values.GOOGLE_FAKE_URL !== undefined)
+    problems.push("GOOGLE_FAKE_URL: the sign-in stand-in cannot be used in production");
+  if (values.MAIL_FAKE_URL !== undefined)
+    problems.push("MAIL_FAKE_URL: the mail stand-in cannot be used in production");
+  if (!values.PUBLIC_URL.startsWith("https://"))
+    problems.push("PUBLIC_URL: must start with https:// in production");
+  if (values.DB_PASSWORD.length < 12)
+    problems.push("DB_PASSWORD: must have at least 12 characters in production");
   if (problems.length > 0) throw new ConfigError(problems);
 }
