@@ -1,0 +1,83 @@
+/** Where the climate methods and their constants come from. */
+export const climateSources = {
+  ASHRAEF14: {
+    author: "ASHRAE",
+    year: 2021,
+    title: "Handbook of Fundamentals, chapter 14 Climatic design information",
+    part: "annual percentiles; extremes by return period (Gumbel, method of moments)",
+    read: "from memory",
+  },
+  SCHOENAU1990: {
+    author: "Schoenau, G. J. and Kehrig, R. A.",
+    year: 1990,
+    title: "A method for calculating degree-days to any base temperature, Energy and Buildings 14",
+    read: "from memory",
+  },
+  ERBS1983: {
+    author: "Erbs, D. G., Klein, S. A. and Beckman, W. A.",
+    year: 1983,
+    title: "Estimation of degree-days and ambient temperature bin data from monthly-average temperatures",
+    read: "from memory",
+  },
+  HITCHIN1983: {
+    author: "Hitchin, E. R.",
+    year: 1983,
+    title: "Estimating monthly degree-days, Building Services Engineering Research and Technology 4",
+    read: "from memory",
+  },
+  ABRAMOWITZ1964: {
+    author: "Abramowitz, M. and Stegun, I. A.",
+    year: 1964,
+    title: "Handbook of Mathematical Functions, NBS",
+    part: "7.1.5, 7.1.14 error function; 26.2.23 start value of the normal quantile",
+    read: "from memory",
+  },
+  LAPSE: {
+    author: "ISO",
+    year: 1975,
+    title: "ISO 2533 Standard atmosphere",
+    part: "0.0065 K per metre of height",
+    read: "from memory",
+  },
+  HOCEVAR1971: {
+    author: "Hocevar, A. and Martsolf, J. D.",
+    year: 1971,
+    title: "Temperature distribution under radiation frost conditions in a central Pennsylvania valley",
+    part: "abstract: 6.2 K warmer per 100 m above the valley floor on calm clear mornings",
+    read: "read",
+  },
+  CLIMATETABLES: {
+    author: "Glassbyre climate table",
+    year: 2026,
+    title: "Own aggregates of open station data (data/climate)",
+    part: "99.6 % value lies 0.8 to 3.6 K, on average 2.2 K, above the mean of the yearly coldest values at 16 places; spread of hours from range and daily spread",
+    read: "read",
+  },
+  SPREADPRACTICE: {
+    author: "trade practice",
+    year: 2026,
+    title: "Spread of daily means, of yearly minima, wind and humidity where a station reports none",
+    read: "common practice",
+  },
+  ROUGHNESS: {
+    author: "Wieringa, J.",
+    year: 1992,
+    title: "Updating the Davenport roughness classification",
+    part: "logarithmic wind profile, open grass 0.03 m",
+    read: "from memory",
+  },
+  GEOID: {
+    author: "IUGG",
+    year: 1980,
+    title: "Geodetic reference system 1980",
+    part: "mean radius 6371.0088 km; haversine formula",
+    read: "from memory",
+  },
+  FAO56: {
+    author: "Allen, R. G., Pereira, L. S., Raes, D. and Smith, M.",
+    year: 1998,
+    title: "Crop evapotranspiration, FAO Irrigation and Drainage Paper 56",
+    part: "saturation vapour pressure; default sunshine coefficients",
+    read: "from memory",
+  },
+} as const;
