@@ -73,6 +73,13 @@ export const climateSources = {
     part: "mean radius 6371.0088 km; haversine formula",
     read: "from memory",
   },
+  HARGREAVES1982: {
+    author: "Hargreaves, G. H. and Samani, Z. A.",
+    year: 1982,
+    title:
+      "Estimating potential evapotranspiration (radiation from the daily range), as in FAO-56 equation 50",
+    read: "from memory",
+  },
   FAO56: {
     author: "Allen, R. G., Pereira, L. S., Raes, D. and Smith, M.",
     year: 1998,
