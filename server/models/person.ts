@@ -7,6 +7,8 @@ import {
   type Sequelize,
 } from "sequelize";
 
+import type { Role } from "../contracts/people.ts";
+
 export class Person extends Model<InferAttributes<Person>, InferCreationAttributes<Person>> {
   declare id: CreationOptional<string>;
   declare name: string;
@@ -14,6 +16,8 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
   declare googleSub: CreationOptional<string | null>;
   declare units: CreationOptional<"si" | "us">;
   declare theme: CreationOptional<"day" | "evening" | "system">;
+  declare activeRole: CreationOptional<Role | null>;
+  declare activeCooperativeId: CreationOptional<string | null>;
   declare lastSeenAt: CreationOptional<Date | null>;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
@@ -27,6 +31,8 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
         googleSub: { type: DataTypes.STRING(255), allowNull: true },
         units: { type: DataTypes.STRING(4), allowNull: false, defaultValue: "si" },
         theme: { type: DataTypes.STRING(10), allowNull: false, defaultValue: "system" },
+        activeRole: { type: DataTypes.STRING(10), allowNull: true },
+        activeCooperativeId: { type: DataTypes.UUID, allowNull: true },
         lastSeenAt: { type: DataTypes.DATE, allowNull: true },
         createdAt: DataTypes.DATE(3),
         updatedAt: DataTypes.DATE(3),

@@ -18,6 +18,8 @@ export const peopleMigration: Migration = {
       google_sub: { type: DataTypes.STRING(255), allowNull: true, unique: true },
       units: { type: DataTypes.STRING(4), allowNull: false, defaultValue: "si" },
       theme: { type: DataTypes.STRING(10), allowNull: false, defaultValue: "system" },
+      active_role: { type: DataTypes.STRING(10), allowNull: true },
+      active_cooperative_id: reference("cooperatives", true),
       last_seen_at: { type: DataTypes.DATE, allowNull: true },
       ...moments,
     });
