@@ -1,0 +1,80 @@
+/** Where the rules of the house balance come from. */
+export const balanceSources = {
+  ISO6946: {
+    author: "ISO",
+    year: 2017,
+    title: "ISO 6946 Building components and building elements: thermal resistance and transmittance",
+    part: "outside film 4 + 4v and 4.16 W/(m² K) of radiation",
+    read: "from memory",
+  },
+  ASHRAEAPP: {
+    author: "ASHRAE",
+    year: 2019,
+    title: "Handbook of HVAC Applications, Environmental control for animals and plants",
+    part: "design loss = sum of U A dT + air change + perimeter; table values at about 6.7 m/s (15 mph)",
+    read: "from memory",
+  },
+  WALTON1983: {
+    author: "Walton, G. N.",
+    year: 1983,
+    title: "Thermal Analysis Research Program reference manual, NBSIR 83-2655",
+    part: "near-horizon sky radiates like the air: share sqrt(F) of the sky's view factor goes to the sky proper",
+    read: "from memory",
+  },
+  AIRHEAT: {
+    author: "ASHRAE",
+    year: 2021,
+    title: "Handbook of Fundamentals, chapter 18",
+    part: "1.2 kg/m³ and 1006 J/(kg K): 0.3353 Wh/(m³ K) at sea level, in proportion to pressure",
+    read: "from memory",
+  },
+  LEAKFANS: {
+    author: "trade practice",
+    year: 2026,
+    title: "Under exhaust fans leakage is part of the fan flow until wind alone moves more air",
+    read: "common practice",
+  },
+  DOWELL1971: {
+    author: "Dowell, M. and Jarratt, P.",
+    year: 1971,
+    title: "A modified regula falsi method for computing the root of an equation, BIT 11",
+    read: "from memory",
+  },
+  THERMOSTAT: {
+    author: "trade practice",
+    year: 2026,
+    title: "Thermostats swing by some tenths of a degree and more",
+    read: "common practice",
+  },
+  DEFROST: {
+    author: "trade practice",
+    year: 2026,
+    title: "Air-to-air exchangers in barns: exhaust below freezing needs defrosting 5 to 15 % of the time",
+    read: "common practice",
+  },
+  SNOWRULE: {
+    author: "trade practice",
+    year: 2026,
+    title:
+      "Screens are opened while it snows, at about -2 °C under an overcast sky, so that the roof sheds its load",
+    read: "common practice",
+  },
+  ATTICAIR: {
+    author: "trade practice",
+    year: 2026,
+    title: "Ventilated attics of barns: about 3 air changes an hour in winter",
+    read: "common practice",
+  },
+  SCREENTABLE: {
+    author: "Bartok, J. W. and eXtension",
+    year: 2012,
+    title: "Thermal curtains: share of heat saved through the covered area",
+    read: "read",
+  },
+  SLOTAIR: {
+    author: "trade practice",
+    year: 2026,
+    title: "Air passes an open screen edge at about 0.2 m/s",
+    read: "common practice",
+  },
+} as const;
