@@ -27,12 +27,15 @@ interface NeedStepsProps {
   installedWords: string;
   proposedWords: string | null;
   height?: number;
+  /** Drawn at a fixed width instead of the room there is; paper has no room to measure. */
+  width?: number;
 }
 
 const words = { fill: "var(--color-ink)", fontSize: 13, fontWeight: 650 };
 
 /** Month by month, what the cold night asks for against what is fitted. The missing part is hatched. */
-export function NeedStepsChart({ data, unit, installedWords, proposedWords, height = 330 }: NeedStepsProps) {
+export function NeedStepsChart(props: NeedStepsProps) {
+  const { data, unit, installedWords, proposedWords, height = 330, width } = props;
   const { onceInYears, everyday, installed, proposed } = data;
   const edges = [...onceInYears.keys(), onceInYears.length];
   const rows = edges.map((edge) => {
@@ -48,124 +51,131 @@ export function NeedStepsChart({ data, unit, installedWords, proposedWords, heig
   const worst = onceInYears.indexOf(Math.max(...onceInYears));
   const worstShort = (onceInYears[worst] ?? 0) - installed;
   const decimals = top < 20 ? 1 : 0;
-  return (
-    <ResponsiveContainer width="100%" height={height}>
-      <ComposedChart
-        data={rows}
-        margin={{ top: 12, right: 6, bottom: 0, left: 0 }}
-        accessibilityLayer={false}
-      >
-        <CartesianGrid vertical={false} stroke="var(--color-rule)" />
-        <XAxis
-          dataKey="edge"
-          type="number"
-          domain={[0, 12]}
-          ticks={monthShort.map((_, i) => i + 0.5)}
-          tickFormatter={(value: number) => monthShort[Math.floor(value)] ?? ""}
-          tickLine={false}
-          axisLine={{ stroke: "var(--color-rule-strong)" }}
-          tick={{ fill: "var(--color-ink)", fontSize: 13 }}
-          interval="preserveStartEnd"
-        />
-        <YAxis
-          width={52}
-          domain={[0, top]}
-          tickCount={6}
-          tickLine={false}
-          axisLine={false}
-          tick={{ fill: "var(--color-ink)", fontSize: 13 }}
-          tickFormatter={(value: number) => number(value, top < 5 ? 1 : 0)}
-        />
+  const wordsAt = width === undefined ? 250 : 90;
+  const chart = (
+    <ComposedChart
+      {...(width === undefined ? {} : { width, height })}
+      data={rows}
+      margin={{ top: 12, right: 6, bottom: 0, left: 0 }}
+      accessibilityLayer={false}
+    >
+      <CartesianGrid vertical={false} stroke="var(--color-rule)" />
+      <XAxis
+        dataKey="edge"
+        type="number"
+        domain={[0, 12]}
+        ticks={monthShort.map((_, i) => i + 0.5)}
+        tickFormatter={(value: number) => monthShort[Math.floor(value)] ?? ""}
+        tickLine={false}
+        axisLine={{ stroke: "var(--color-rule-strong)" }}
+        tick={{ fill: "var(--color-ink)", fontSize: 13 }}
+        interval="preserveStartEnd"
+      />
+      <YAxis
+        width={52}
+        domain={[0, top]}
+        tickCount={6}
+        tickLine={false}
+        axisLine={false}
+        tick={{ fill: "var(--color-ink)", fontSize: 13 }}
+        tickFormatter={(value: number) => number(value, top < 5 ? 1 : 0)}
+      />
+      <Area
+        type="stepAfter"
+        dataKey="need"
+        stroke="none"
+        fill="var(--color-trough)"
+        fillOpacity={1}
+        isAnimationActive={false}
+        activeDot={false}
+      />
+      {worstShort > 0 ? (
         <Area
           type="stepAfter"
-          dataKey="need"
+          dataKey="short"
           stroke="none"
-          fill="var(--color-trough)"
+          fill={hatch("short")}
           fillOpacity={1}
           isAnimationActive={false}
           activeDot={false}
         />
-        {worstShort > 0 ? (
-          <Area
-            type="stepAfter"
-            dataKey="short"
-            stroke="none"
-            fill={hatch("short")}
-            fillOpacity={1}
-            isAnimationActive={false}
-            activeDot={false}
-          />
-        ) : null}
-        <Line
-          type="stepAfter"
-          dataKey="everyday"
-          stroke="var(--color-ink-2)"
-          strokeWidth={1.6}
-          strokeDasharray="2 3"
-          dot={false}
-          isAnimationActive={false}
-          activeDot={false}
-        />
-        <Line
-          type="stepAfter"
-          dataKey="need"
-          stroke="var(--color-ink)"
-          strokeWidth={2.6}
-          dot={false}
-          isAnimationActive={false}
-          activeDot={false}
-        />
+      ) : null}
+      <Line
+        type="stepAfter"
+        dataKey="everyday"
+        stroke="var(--color-ink-2)"
+        strokeWidth={1.6}
+        strokeDasharray="2 3"
+        dot={false}
+        isAnimationActive={false}
+        activeDot={false}
+      />
+      <Line
+        type="stepAfter"
+        dataKey="need"
+        stroke="var(--color-ink)"
+        strokeWidth={2.6}
+        dot={false}
+        isAnimationActive={false}
+        activeDot={false}
+      />
+      <ReferenceLine
+        y={installed}
+        stroke="var(--color-redlead)"
+        strokeWidth={2}
+        strokeDasharray="8 4"
+        label={{
+          value: installedWords,
+          position: "insideBottomLeft",
+          offset: 6,
+          ...words,
+          fill: "var(--color-redlead)",
+          dx: wordsAt,
+        }}
+      />
+      {proposed !== null && proposedWords ? (
         <ReferenceLine
-          y={installed}
-          stroke="var(--color-redlead)"
-          strokeWidth={2}
-          strokeDasharray="8 4"
+          y={proposed}
+          stroke="var(--color-bottle)"
+          strokeWidth={2.6}
           label={{
-            value: installedWords,
+            value: proposedWords,
             position: "insideBottomLeft",
-            offset: 6,
             ...words,
-            fill: "var(--color-redlead)",
-            dx: 250,
+            fill: "var(--color-bottle)",
+            dx: wordsAt,
           }}
         />
-        {proposed !== null && proposedWords ? (
-          <ReferenceLine
-            y={proposed}
-            stroke="var(--color-bottle)"
-            strokeWidth={2.6}
-            label={{
-              value: proposedWords,
-              position: "insideBottomLeft",
-              ...words,
-              fill: "var(--color-bottle)",
-              dx: 250,
-            }}
-          />
-        ) : null}
-        {onceInYears.map((need, month) => (
-          <ReferenceDot
-            key={monthShort[month]}
-            x={month + 0.5}
-            y={need}
-            r={0}
-            label={{ value: number(need, decimals), position: "top", ...words }}
-          />
-        ))}
-        {worstShort > 0 && installed > 0 ? (
-          <ReferenceDot
-            x={worst + 0.5}
-            y={installed + worstShort / 2}
-            r={0}
-            label={{
-              content: ({ viewBox }) => (
-                <ShortPlate viewBox={viewBox} label={`${number(worstShort, decimals)} ${unit}`} />
-              ),
-            }}
-          />
-        ) : null}
-      </ComposedChart>
+      ) : null}
+      {onceInYears.map((need, month) => (
+        <ReferenceDot
+          key={monthShort[month]}
+          x={month + 0.5}
+          y={need}
+          r={0}
+          label={{ value: number(need, decimals), position: "top", ...words }}
+        />
+      ))}
+      {worstShort > 0 && installed > 0 ? (
+        <ReferenceDot
+          x={worst + 0.5}
+          y={installed + worstShort / 2}
+          r={0}
+          label={{
+            content: ({ viewBox }) => (
+              <ShortPlate viewBox={viewBox} label={`${number(worstShort, decimals)} ${unit}`} />
+            ),
+          }}
+        />
+      ) : null}
+    </ComposedChart>
+  );
+  return width === undefined ? (
+    <ResponsiveContainer width="100%" height={height}>
+      {chart}
     </ResponsiveContainer>
+  ) : (
+    chart
   );
 }
 

@@ -1,4 +1,9 @@
-/** The heat balance of one building. */
+import { useParams } from "react-router-dom";
+import { HeatPage } from "./heat/heat-page.tsx";
+import { LatestPlan } from "./latest-plan.tsx";
+
+/** The heat balance of one building, from its latest plan. */
 export function HeatScreen() {
-  return <p className="p-4">Opening</p>;
+  const { buildingId = "" } = useParams();
+  return <LatestPlan buildingId={buildingId}>{(loaded) => <HeatPage {...loaded} />}</LatestPlan>;
 }

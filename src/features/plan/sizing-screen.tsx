@@ -1,4 +1,9 @@
-/** Need against installed heat, and the choice of heaters. */
+import { useParams } from "react-router-dom";
+import { LatestPlan } from "./latest-plan.tsx";
+import { SizingPage } from "./sizing/sizing-page.tsx";
+
+/** Need against installed heat, and the choice of heaters, from the latest plan. */
 export function SizingScreen() {
-  return <p className="p-4">Opening</p>;
+  const { buildingId = "" } = useParams();
+  return <LatestPlan buildingId={buildingId}>{(loaded) => <SizingPage {...loaded} />}</LatestPlan>;
 }
