@@ -1,10 +1,11 @@
 import type { LossesW } from "../plan/plan-types.ts";
 import { airHeatWK, recoveredShareFrac } from "./air-heat.ts";
-import type { OutsideHour, ScreenPosition, SurfaceFlux, SurfaceModel } from "./surface-model.ts";
+import type { FluxGroup, OutsideHour, ScreenPosition, SurfaceFlux, SurfaceModel } from "./surface-model.ts";
 
 /** The parts of a house that lose heat, made ready for many hours. */
 export interface HouseShell {
   surfaces: readonly SurfaceModel[];
+  groups: readonly FluxGroup[];
   perimeterM: number;
   floorEdgeLossWMK: number;
   pressurePa: number;
@@ -24,31 +25,32 @@ export interface ShellHour {
   outside: OutsideHour;
   screen: ScreenPosition;
   air: AirFlows;
-  /** Sun on each surface, W/m², in the order of the surfaces. */
-  sunWM2: readonly number[];
+  /** Mean sun on each group, W/m²; empty in the dark. */
+  groupSunWM2: readonly number[];
 }
 
 export interface HouseLosses {
   lossesW: LossesW;
   totalW: number;
+  /** Heat through each group. */
   fluxes: SurfaceFlux[];
 }
 
 /**
  * Heat leaving a house by every path at a given inside temperature. "sky" is what the outer faces, and the room through a
  * clear cover, radiate to the sky; "cover" is the rest of what leaves through the surfaces.
- * Shape: shell, hour, inside °C → W by path, the total, and the heat through each surface. Source [ASHRAEAPP], [AIRHEAT].
+ * Shape: shell, hour, inside °C → W by path, the total, and the heat through each group. Source [ASHRAEAPP], [AIRHEAT].
  */
 export function houseLosses(shell: HouseShell, hour: ShellHour, insideTempC: number): HouseLosses {
   const { outside, air } = hour;
   const differenceK = insideTempC - outside.airTempC;
-  const fluxes = shell.surfaces.map((surface, index) =>
-    surface.flux(insideTempC, outside, hour.screen, hour.sunWM2[index] ?? 0),
+  const fluxes = shell.groups.map((group, index) =>
+    group.flux(insideTempC, outside, hour.screen, hour.groupSunWM2[index] ?? 0),
   );
   let throughSurfacesW = 0;
   let skyW = 0;
   fluxes.forEach((flux, index) => {
-    const areaM2 = shell.surfaces[index]?.areaM2 ?? 0;
+    const areaM2 = shell.groups[index]?.areaM2 ?? 0;
     throughSurfacesW += flux.lossWM2 * areaM2;
     skyW += flux.toSkyWM2 * areaM2;
   });
