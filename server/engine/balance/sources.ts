@@ -46,6 +46,21 @@ export const balanceSources = {
     title: "Thermostats swing by some tenths of a degree and more",
     read: "common practice",
   },
+  BOTRULE: {
+    author: "trade practice",
+    year: 2026,
+    title:
+      "Outside convection: Watmuff for single houses, Bot for ranges of a hectare and more, 4 + 4v for barns",
+    read: "common practice",
+  },
+  WETRULE: {
+    author: "Feuilloley, M. and Issanchou, G.",
+    year: 1996,
+    title:
+      "Greenhouse covering materials measurement and modelling using the hot box method, and condensation effects",
+    part: "abstract: condensation changes the loss of films; a cropped house is taken as wet inside",
+    read: "read",
+  },
   DEFROST: {
     author: "trade practice",
     year: 2026,
