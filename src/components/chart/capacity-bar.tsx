@@ -46,17 +46,24 @@ export function CapacityBar({ parts, needShare, sentence, shortWords, height = 3
               strokeWidth="2"
             />
           </svg>
-          {shortWords && missing > 0.22 ? (
-            <span className="absolute inset-0 m-auto h-fit w-fit bg-sheet px-1 text-sm font-bold whitespace-nowrap text-redlead">
-              {shortWords}
-            </span>
-          ) : null}
         </div>
       ) : null}
       <div
         className="absolute -top-2 -bottom-2 w-[3px] -translate-x-1/2 bg-ink"
         style={{ left: at(needShare) }}
       />
+      {shortWords ? (
+        <span
+          className="absolute inset-y-0 my-auto h-fit bg-sheet px-1.5 text-sm font-bold whitespace-nowrap text-redlead"
+          style={
+            needShare < 0.72
+              ? { left: `calc(${at(needShare)} + 8px)` }
+              : { right: `calc(100% - ${at(needShare)} + 8px)` }
+          }
+        >
+          {shortWords}
+        </span>
+      ) : null}
     </div>
   );
 }

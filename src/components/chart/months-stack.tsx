@@ -2,6 +2,7 @@ import { Bar, BarChart, CartesianGrid, Legend, ResponsiveContainer, XAxis, YAxis
 import { number } from "../../lib/format.ts";
 import { hatch, PathMark } from "../section-drawing/hatches.tsx";
 import { type HeatPath, heatPaths } from "../section-drawing/heat-paths.ts";
+import { axisStep, axisTicks, niceTop } from "./nice-top.ts";
 
 export interface MonthStack {
   name: string;
@@ -28,6 +29,12 @@ function LegendRow({ paths }: { paths: HeatPath[] }) {
   );
 }
 
+function sumOf(month: MonthStack, paths: HeatPath[], side: "out" | "in"): number {
+  return paths
+    .filter((path) => (heatPaths[path].direction === "out") === (side === "out"))
+    .reduce((sum, path) => sum + (month.amounts[path] ?? 0), 0);
+}
+
 /** Twelve months, losses upwards and gains downwards, each path with its own hatch in a fixed order. */
 export function MonthsStack({ months, paths, height = 300 }: MonthsStackProps) {
   const rows = months.map((month) => ({
@@ -39,6 +46,10 @@ export function MonthsStack({ months, paths, height = 300 }: MonthsStackProps) {
       }),
     ),
   }));
+  const top = niceTop(Math.max(...months.map((month) => sumOf(month, paths, "out"))));
+  const bottom = niceTop(Math.max(...months.map((month) => sumOf(month, paths, "in"))));
+  const step = axisStep(top + bottom);
+  const ticks = axisTicks(-Math.ceil(bottom / step) * step, Math.ceil(top / step) * step, step);
   return (
     <ResponsiveContainer width="100%" height={height}>
       <BarChart
@@ -57,13 +68,19 @@ export function MonthsStack({ months, paths, height = 300 }: MonthsStackProps) {
         />
         <YAxis
           width={56}
-          tickCount={6}
+          ticks={ticks}
+          domain={[ticks[0] ?? 0, ticks.at(-1) ?? 1]}
           tickLine={false}
           axisLine={false}
           tick={{ fill: "var(--color-ink)", fontSize: 13 }}
           tickFormatter={(value: number) => number(Math.abs(value))}
         />
-        <Legend itemSorter={null} verticalAlign="top" content={<LegendRow paths={paths} />} />
+        <Legend
+          itemSorter={null}
+          verticalAlign="top"
+          wrapperStyle={{ position: "static", paddingBottom: 8 }}
+          content={<LegendRow paths={paths} />}
+        />
         {paths.map((path) => (
           <Bar
             key={path}

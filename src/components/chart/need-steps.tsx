@@ -11,6 +11,7 @@ import {
 } from "recharts";
 import { monthShort, number } from "../../lib/format.ts";
 import { hatch } from "../section-drawing/hatches.tsx";
+import { LineWords } from "./line-words.tsx";
 import { niceTop } from "./nice-top.ts";
 
 export interface NeedSteps {
@@ -51,7 +52,8 @@ export function NeedStepsChart(props: NeedStepsProps) {
   const worst = onceInYears.indexOf(Math.max(...onceInYears));
   const worstShort = (onceInYears[worst] ?? 0) - installed;
   const decimals = top < 20 ? 1 : 0;
-  const wordsAt = width === undefined ? 250 : 90;
+  // The month that asks for least leaves the most room for words.
+  const wordsAt = (onceInYears.indexOf(Math.min(...onceInYears)) + 0.5) / 12;
   const chart = (
     <ComposedChart
       {...(width === undefined ? {} : { width, height })}
@@ -125,12 +127,9 @@ export function NeedStepsChart(props: NeedStepsProps) {
         strokeWidth={2}
         strokeDasharray="8 4"
         label={{
-          value: installedWords,
-          position: "insideBottomLeft",
-          offset: 6,
-          ...words,
-          fill: "var(--color-redlead)",
-          dx: wordsAt,
+          content: ({ viewBox }) => (
+            <LineWords viewBox={viewBox} label={installedWords} colour="var(--color-redlead)" at={wordsAt} />
+          ),
         }}
       />
       {proposed !== null && proposedWords ? (
@@ -139,11 +138,9 @@ export function NeedStepsChart(props: NeedStepsProps) {
           stroke="var(--color-bottle)"
           strokeWidth={2.6}
           label={{
-            value: proposedWords,
-            position: "insideBottomLeft",
-            ...words,
-            fill: "var(--color-bottle)",
-            dx: wordsAt,
+            content: ({ viewBox }) => (
+              <LineWords viewBox={viewBox} label={proposedWords} colour="var(--color-bottle)" at={wordsAt} />
+            ),
           }}
         />
       ) : null}

@@ -8,3 +8,18 @@ export function niceTop(greatest: number): number {
   const step = stepsOfTen.find((candidate) => candidate * power >= wanted) ?? 10;
   return step * power;
 }
+
+const MOST_LINES = 6;
+
+/** A round step that cuts a span into at most six parts. */
+export function axisStep(span: number): number {
+  const wanted = Math.max(span, 1e-9) / MOST_LINES;
+  const power = 10 ** Math.floor(Math.log10(wanted));
+  return ([1, 2, 2.5, 5].find((candidate) => candidate * power >= wanted) ?? 10) * power;
+}
+
+/** Round values from `from` to `to`. */
+export function axisTicks(from: number, to: number, step: number): number[] {
+  const count = Math.round((to - from) / step);
+  return Array.from({ length: count + 1 }, (_, i) => Math.round((from + i * step) / step) * step);
+}

@@ -16,7 +16,7 @@ interface FieldRowProps {
 export function FieldRow({ label, hint, error, errorId, hintId, control, origin, active }: FieldRowProps) {
   return (
     <div
-      className={`grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 border-b border-rule px-4 pt-2 md:grid-cols-[minmax(0,1fr)_250px_112px] md:px-0 ${active ? "bg-sheet" : ""}`}
+      className={`grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 border-b border-rule px-4 pt-1.5 md:grid-cols-[minmax(0,1fr)_250px_112px] md:px-0 ${active ? "bg-sheet" : ""}`}
     >
       <div className={active ? "font-bold" : ""}>
         {label}
@@ -31,7 +31,7 @@ export function FieldRow({ label, hint, error, errorId, hintId, control, origin,
       <p
         id={errorId}
         aria-live="polite"
-        className="col-span-full min-h-[18px] pb-1 text-right text-xs font-medium text-redlead md:pr-[124px]"
+        className="col-span-full min-h-[14px] text-right leading-[14px] pb-0.5 text-xs font-medium text-redlead md:pr-[124px]"
       >
         {error ?? ""}
       </p>

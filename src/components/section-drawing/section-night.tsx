@@ -1,5 +1,5 @@
 import type { UnitSystem } from "../../../server/engine/units.ts";
-import { roundTemperature } from "../../lib/format.ts";
+import { roundTemperature, temperature } from "../../lib/format.ts";
 import { frameFor, px } from "./frame.ts";
 import { Plate } from "./heat-label.tsx";
 import { ScaleBar } from "./scale-bar.tsx";
@@ -28,7 +28,7 @@ const fit = {
 /** The house on its coldest night: outside, and where the inside would come to rest. */
 export function SectionNight({ shape, shell, system, outsideC, insideC, cold }: SectionNightProps) {
   const frame = frameFor(shape, fit);
-  const outside = roundTemperature(outsideC, system);
+  const outside = temperature(outsideC, system);
   const inside = roundTemperature(insideC, system);
   const words = cold ? "would fall to" : "stays at";
   const x = frame.x(0);

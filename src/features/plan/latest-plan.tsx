@@ -4,6 +4,7 @@ import { Link } from "react-router-dom";
 import type { BuildingView } from "../../../server/contracts/buildings.ts";
 import type { LibraryView } from "../../../server/contracts/library.ts";
 import type { PlanView } from "../../../server/contracts/plans.ts";
+import { PageState } from "../../components/page-state.tsx";
 import { BuildingHead } from "../../components/plan/building-head.tsx";
 import { HatchSheet } from "../../components/section-drawing/hatches.tsx";
 import { buildingQuery } from "../../lib/building-query.ts";

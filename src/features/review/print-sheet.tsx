@@ -143,7 +143,7 @@ export function PrintSheet({ plan, library, units }: PrintSheetProps) {
       </div>
       <section className="mt-3 break-inside-avoid">
         <b>Taken for granted</b>
-        <ul className="m-0 columns-2 gap-5 pl-4">
+        <ul className="m-0 list-disc columns-2 gap-5 pl-4">
           {managementSentences(plan.survey, library, units).map((sentence) => (
             <li key={sentence.id}>{sentence.text}</li>
           ))}

@@ -72,7 +72,7 @@ export function ReviewPage({ plan }: { plan: PlanView }) {
                 <h2 id="changes-heading" className="m-0 font-sign text-lg font-bold">
                   What it means for you
                 </h2>
-                <ul className="m-0 mt-1 pl-6">
+                <ul className="m-0 mt-1 list-disc pl-6">
                   {changes.map((change) => (
                     <li key={change}>{change}</li>
                   ))}
@@ -89,7 +89,7 @@ export function ReviewPage({ plan }: { plan: PlanView }) {
               <h2 id="missing-heading" className="m-0 font-sign text-lg font-bold">
                 What is not in this plan
               </h2>
-              <ul className="m-0 mt-1 pl-6">
+              <ul className="m-0 mt-1 list-disc pl-6">
                 {notIncluded.map((line) => (
                   <li key={line}>{line}</li>
                 ))}

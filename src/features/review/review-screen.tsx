@@ -1,5 +1,6 @@
 import { useQuery } from "@tanstack/react-query";
 import { useParams } from "react-router-dom";
+import { PageState } from "../../components/page-state.tsx";
 import { planQuery } from "../../lib/plan-queries.ts";
 import { ReviewPage } from "./review-page.tsx";
 

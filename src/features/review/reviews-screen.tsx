@@ -1,6 +1,7 @@
 import { useQuery } from "@tanstack/react-query";
 import { Link } from "react-router-dom";
 import type { ReviewLine } from "../../../server/contracts/plans.ts";
+import { PageState } from "../../components/page-state.tsx";
 import { counted, dayAndClock } from "../../lib/format.ts";
 import { reviewsQuery } from "./api/reviews-query.ts";
 import { statusWords } from "./plain-words.ts";

@@ -95,9 +95,14 @@ export function SurveyForm({ building, view, library }: SurveyFormProps) {
     [form.control, library, units.system, disabled, typedOrigin, active, sync.refused, sync.forget],
   );
   const action = building.can.plan ? (
-    <Button variant="primary" busy={workOut.isPending} onClick={() => void compute()}>
-      Work out the heat
-    </Button>
+    <button
+      type="button"
+      disabled={workOut.isPending}
+      onClick={() => void compute()}
+      className="min-h-10 min-w-44 rounded-control bg-bottle px-4 font-bold text-on-bottle hover:bg-bottle-deep disabled:bg-trough disabled:text-ink-2 pointer-coarse:min-h-12"
+    >
+      {workOut.isPending ? "Working…" : "Work out the heat"}
+    </button>
   ) : null;
 
   return (

@@ -1,5 +1,6 @@
 import { useQuery } from "@tanstack/react-query";
 import { useParams } from "react-router-dom";
+import { PageState } from "../../components/page-state.tsx";
 import { buildingQuery } from "../../lib/building-query.ts";
 import { libraryQuery } from "../../lib/library-query.ts";
 import { surveyQuery } from "./api/survey-api.ts";

@@ -15,6 +15,8 @@ import type { Units } from "../../../lib/units.ts";
 import { flowWriter } from "./flow-writer.ts";
 import { WhyPart } from "./why-part.tsx";
 
+const LEAST_SHOWN_W = 0.5;
+
 interface BalanceTableProps {
   balance: HouseBalance;
   result: PlanResult;
@@ -28,6 +30,7 @@ export function BalanceTable({ balance, result, units }: BalanceTableProps) {
   const all = Math.max(totalOut(flows), 1);
   const writer = flowWriter(flows, units);
   const areaM2 = result.geometry.floorAreaM2;
+  const flux = (heatW: number) => units.figure(heatW / areaM2, "heatFlux", { decimals: 1 }).value;
   const row = (path: HeatPath) => {
     const opened = open === path;
     const share = flows[path] / all;
@@ -70,9 +73,17 @@ export function BalanceTable({ balance, result, units }: BalanceTableProps) {
               )}
             </svg>
           </td>
-          <td className="text-right font-bold">{writer.plain(flows[path])}</td>
-          <td className="pl-3 text-right">{units.figure(flows[path] / areaM2, "heatFlux").value}</td>
-          <td className="pl-3 text-right">{percent(share)}</td>
+          {flows[path] < LEAST_SHOWN_W && heatPaths[path].direction === "in" ? (
+            <td colSpan={3} className="text-right text-ink-2">
+              none
+            </td>
+          ) : (
+            <>
+              <td className="text-right font-bold">{writer.plain(flows[path])}</td>
+              <td className="pl-3 text-right">{flux(flows[path])}</td>
+              <td className="pl-3 text-right">{percent(share)}</td>
+            </>
+          )}
         </tr>
         {opened ? (
           <tr className="border-b-2 border-ink bg-trough">
@@ -91,7 +102,7 @@ export function BalanceTable({ balance, result, units }: BalanceTableProps) {
       </th>
       <td aria-hidden="true" className="max-sm:hidden" />
       <td className="text-right">{writer.plain(amountW)}</td>
-      <td className="pl-3 text-right">{units.figure(amountW / areaM2, "heatFlux").value}</td>
+      <td className="pl-3 text-right">{flux(amountW)}</td>
       <td className="pl-3 text-right">{percent(amountW / all)}</td>
     </tr>
   );

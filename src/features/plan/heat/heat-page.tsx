@@ -10,6 +10,7 @@ import { dayAndClock, monthName } from "../../../lib/format.ts";
 import type { LoadedPlan } from "../latest-plan.tsx";
 import { BalancePicker } from "./balance-picker.tsx";
 import { BalanceTable } from "./balance-table.tsx";
+import { DayPart } from "./day-part.tsx";
 import { flowWriter } from "./flow-writer.ts";
 import { SectionPanel } from "./section-panel.tsx";
 import { readSelection, type Selection, selectedBalance } from "./selection.ts";
@@ -81,6 +82,11 @@ export function HeatPage({ building, plan, library, units }: LoadedPlan) {
             onSelect={select}
             units={units}
           />
+          {month ? (
+            <div className="border-t border-rule p-4">
+              <DayPart month={month} result={result} units={units} fileName={fileName(building, "day")} />
+            </div>
+          ) : null}
         </div>
         <div className="min-w-0 border-ink p-4 max-xl:border-t-2 xl:border-l-2">
           <h2 className="m-0 font-sign text-lg font-bold">{`${monthName(selection.month)}, ${night}`}</h2>
