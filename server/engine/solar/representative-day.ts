@@ -11,7 +11,7 @@ import { representativeDayOfYear, type SunPosition, solarMidnightMs, sunPosition
 
 /** The sun of one hour, at its middle. */
 export interface SunHour {
-  /** Hours from midnight, 0.5 to 23.5, in mean solar time of the place. */
+  /** Hours from midnight, 0.5 to 23.5, in true solar time of the place. */
   hour: number;
   sun: SunPosition;
   ghiWM2: number;
@@ -55,7 +55,8 @@ export function representativeDaySun({
   const sunset = sunsetHourAngleDeg(latitudeDeg, declinationDeg(dayOfYear));
   const clearness = outside > 0 ? Math.min(1, globalKwhM2Day / outside) : 0;
   const diffuseShare = diffuseShareMonthly(clearness, sunset);
-  const midnight = solarMidnightMs(dayOfYear, longitudeDeg);
+  // True solar time, so that the day is even around noon.
+  const midnight = solarMidnightMs(dayOfYear, longitudeDeg) - equationOfTimeMin(dayOfYear) * 60_000;
   const normal = SOLAR_CONSTANT_WM2 * distanceFactor(dayOfYear);
   const hours = Array.from({ length: 24 }, (_, index) => {
     const sun = sunPosition(midnight + (index + 0.5) * 3_600_000, latitudeDeg, longitudeDeg);
