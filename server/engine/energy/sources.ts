@@ -34,6 +34,19 @@ export const energySources = {
     title: "0.7 to 0.9 of lamp power warms the air",
     read: "common practice",
   },
+  FRESNEL: {
+    author: "Duffie, J. A. and Beckman, W. A.",
+    year: 2013,
+    title: "Solar engineering of thermal processes, chapter 5",
+    part: "transmittance of film and glass for diffuse light against a right angle",
+    read: "from memory",
+  },
+  ALBEDO: {
+    author: "trade practice",
+    year: 2026,
+    title: "Crop and floor send 0.10 to 0.25 of the sun out again",
+    read: "common practice",
+  },
   VENTPOINT: {
     author: "trade practice",
     year: 2026,
