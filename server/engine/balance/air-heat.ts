@@ -13,21 +13,3 @@ export function airHeatWK(flowM3H: number, pressurePa: number): number {
   requireInRange("pressurePa", pressurePa, 40_000, 110_000, "Pa");
   return AIR_HEAT_WHM3K * flowM3H * (pressurePa / STANDARD_PRESSURE_PA);
 }
-
-/** Loss of recovery to defrosting, as a share of the recovery. Source [DEFROST]: 5 to 15 % of the time. */
-const DEFROST_SHARE = 0.1;
-/** Exhaust this far below freezing defrosts all it ever will; in between the loss grows evenly, so that nothing jumps. */
-const DEFROST_FADE_K = 2;
-
-/**
- * Share of the ventilation heat that an exchanger gives back; a tenth less where its exhaust would freeze.
- * Shape: rated share 0 to 0.9, inside °C, outside °C (−80 to 60) → share. Throws EngineInputError outside. Source [DEFROST].
- */
-export function recoveredShareFrac(ratedFrac: number, insideTempC: number, outdoorTempC: number): number {
-  requireInRange("ratedFrac", ratedFrac, 0, 0.9);
-  requireInRange("insideTempC", insideTempC, -80, 60, "°C");
-  requireInRange("outdoorTempC", outdoorTempC, -80, 60, "°C");
-  const exhaustC = insideTempC - ratedFrac * (insideTempC - outdoorTempC);
-  const frosted = Math.min(1, Math.max(0, -exhaustC / DEFROST_FADE_K));
-  return ratedFrac * (1 - DEFROST_SHARE * frosted);
-}

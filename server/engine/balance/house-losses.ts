@@ -1,5 +1,6 @@
+import { heatRecoveryFrac } from "../livestock/minimum-ventilation.ts";
 import type { LossesW } from "../plan/plan-types.ts";
-import { airHeatWK, recoveredShareFrac } from "./air-heat.ts";
+import { airHeatWK } from "./air-heat.ts";
 import type { FluxGroup, OutsideHour, ScreenPosition, SurfaceFlux, SurfaceModel } from "./surface-model.ts";
 
 /** The parts of a house that lose heat, made ready for many hours. */
@@ -54,7 +55,7 @@ export function houseLosses(shell: HouseShell, hour: ShellHour, insideTempC: num
     throughSurfacesW += flux.lossWM2 * areaM2;
     skyW += flux.toSkyWM2 * areaM2;
   });
-  const recovered = recoveredShareFrac(air.recoveryFrac, insideTempC, outside.airTempC);
+  const recovered = heatRecoveryFrac(air.recoveryFrac, insideTempC, outside.airTempC);
   const airWK =
     airHeatWK(air.fansM3H, shell.pressurePa) * (1 - recovered) + airHeatWK(air.leaksM3H, shell.pressurePa);
   const airW = airWK * differenceK;

@@ -61,12 +61,6 @@ export const balanceSources = {
     part: "abstract: condensation changes the loss of films; a cropped house is taken as wet inside",
     read: "read",
   },
-  DEFROST: {
-    author: "trade practice",
-    year: 2026,
-    title: "Air-to-air exchangers in barns: exhaust below freezing needs defrosting 5 to 15 % of the time",
-    read: "common practice",
-  },
   SNOWRULE: {
     author: "trade practice",
     year: 2026,

@@ -1,5 +1,6 @@
-import { airHeatWK, recoveredShareFrac } from "../balance/air-heat.ts";
+import { airHeatWK } from "../balance/air-heat.ts";
 import type { AirFlows } from "../balance/house-losses.ts";
+import { heatRecoveryFrac } from "../livestock/minimum-ventilation.ts";
 import type { GainPath, LossPath } from "../plan/plan-types.ts";
 import type { RoomHour } from "./day-run.ts";
 import type { MonthEnergyInput, Responses } from "./month-energy.ts";
@@ -37,7 +38,7 @@ export function roomHours(
     const setpointC = day ? input.daySetpointC : input.nightSetpointC;
     const groupSun = day ? (input.sun.groupSunWM2[hour] ?? []).map((value) => value * brightness) : [];
     const air = input.air(setpointC, outdoorTempC);
-    const recovered = recoveredShareFrac(air.recoveryFrac, setpointC, outdoorTempC);
+    const recovered = heatRecoveryFrac(air.recoveryFrac, setpointC, outdoorTempC);
     const airWK =
       airHeatWK(air.fansM3H, input.shell.pressurePa) * (1 - recovered) +
       airHeatWK(air.leaksM3H, input.shell.pressurePa);

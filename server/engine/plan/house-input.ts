@@ -95,6 +95,8 @@ export interface HousePlanInput {
   kneewallHeightM: number;
   screen: ScreenInput | null;
   leakageAirChangesPerHour: number;
+  /** Under running fans leaks are a part of the fans' flow; "added" puts them on top, as some hand calculations do. */
+  leakageUnderFans?: "part" | "added";
   floorEdgeLossWMK: number;
   /** Share of the sun that passes the clean cover and also frame, dirt and drops. */
   frameAndDirtFrac: number;
