@@ -147,6 +147,13 @@ export function joined({ value, unit }: Figure): string {
   return unit === "%" || unit === "°" ? `${value}${unit}` : `${value}${NO_BREAK}${unit}`;
 }
 
+/** A length on a drawing: no more decimals than the measure has. */
+export function lengthText(siValueM: number, system: UnitSystem): string {
+  const shown = fromSi(siValueM, displayUnit("length", system));
+  const round = Math.abs(shown * 10 - Math.round(shown * 10)) < 0.05;
+  return text(siValueM, "length", system, { decimals: round || system === "us" ? 1 : 2 });
+}
+
 /** Heat for a sentence: whole kW or kBtu/h once the number is large enough not to mislead. */
 export function heat(siValueW: number | null | undefined, system: UnitSystem): string {
   const shown = fromSi(siValueW ?? Number.NaN, displayUnit("power", system));

@@ -32,7 +32,7 @@ export function CapacityBar({ parts, needShare, sentence, shortWords, height = 3
           style={{ width: at(part.share) }}
           className={`flex items-center overflow-hidden border-[1.5px] border-ink px-2 text-sm font-bold whitespace-nowrap not-first:border-l-0 ${part.fresh ? "bg-bottle-tint" : "bg-trough"}`}
         >
-          {part.share > 0.09 ? part.words : ""}
+          {part.share > 0.09 ? <span className="relative z-1 bg-inherit px-0.5">{part.words}</span> : null}
         </div>
       ))}
       {missing > 0.002 ? (

@@ -9,9 +9,9 @@ export function niceTop(greatest: number): number {
   return step * power;
 }
 
-const MOST_LINES = 6;
+const MOST_LINES = 8;
 
-/** A round step that cuts a span into at most six parts. */
+/** A round step that cuts a span into at most eight parts. */
 export function axisStep(span: number): number {
   const wanted = Math.max(span, 1e-9) / MOST_LINES;
   const power = 10 ** Math.floor(Math.log10(wanted));

@@ -28,7 +28,7 @@ export function ChoiceButtons<T extends string>(props: ChoiceButtonsProps<T>) {
       className={
         pictured
           ? "grid grid-cols-3 border-t-[1.5px] border-l-[1.5px] border-rule-strong sm:grid-cols-4 xl:grid-cols-7"
-          : "flex min-h-[46px] max-md:min-h-13"
+          : "flex"
       }
     >
       <legend className="sr-only">{legend}</legend>
@@ -36,7 +36,7 @@ export function ChoiceButtons<T extends string>(props: ChoiceButtonsProps<T>) {
         const chosen = option.value === value;
         const shape = pictured
           ? "min-h-[76px] flex-col justify-end gap-1 border-r-[1.5px] border-b-[1.5px] pt-2 pb-1.5 text-sm font-semibold"
-          : "flex-1 justify-center border-[1.5px] -ml-[1.5px] first-of-type:ml-0 first-of-type:rounded-l-control last-of-type:rounded-r-control";
+          : "min-h-[46px] flex-1 justify-center border-[1.5px] max-md:min-h-13 -ml-[1.5px] first-of-type:ml-0 first-of-type:rounded-l-control last-of-type:rounded-r-control";
         return (
           <label
             key={option.value}

@@ -15,9 +15,7 @@ interface FieldRowProps {
 /** One question: words at the left, the control, and where the answer came from. */
 export function FieldRow({ label, hint, error, errorId, hintId, control, origin, active }: FieldRowProps) {
   return (
-    <div
-      className={`grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 border-b border-rule px-4 pt-1.5 md:grid-cols-[minmax(0,1fr)_250px_112px] md:px-0 ${active ? "bg-sheet" : ""}`}
-    >
+    <div className="grid grid-cols-[minmax(0,1fr)_216px] items-center gap-x-3 border-b border-rule px-4 pt-1.5 md:grid-cols-[minmax(0,1fr)_250px_112px] md:px-0">
       <div className={active ? "font-bold" : ""}>
         {label}
         {hint ? (
@@ -26,12 +24,12 @@ export function FieldRow({ label, hint, error, errorId, hintId, control, origin,
           </span>
         ) : null}
       </div>
-      <div className="w-[216px] md:w-auto">{control}</div>
-      <div className="max-md:col-start-2 max-md:justify-self-end">{origin}</div>
+      <div className="max-md:row-span-2">{control}</div>
+      <div className="max-md:col-start-1 max-md:row-start-2 max-md:-ml-1">{origin}</div>
       <p
         id={errorId}
         aria-live="polite"
-        className="col-span-full min-h-[14px] text-right leading-[14px] pb-0.5 text-xs font-medium text-redlead md:pr-[124px]"
+        className="col-span-full m-0 min-h-[14px] pb-0.5 text-right text-xs leading-[14px] font-medium text-redlead md:pr-[124px]"
       >
         {error ?? ""}
       </p>

@@ -11,9 +11,14 @@ interface OptionBarProps {
   height?: number;
 }
 
+const NEED_AT_MOST = 0.66;
+
 /** Right end of a scale on which all options and the need have room. */
 export function optionScaleW(options: Pick<HeaterOption, "totalW">[], needW: number): number {
-  return Math.max(needW, ...options.map((option) => option.totalW)) * 1.04;
+  const longest = Math.max(needW, ...options.map((option) => option.totalW)) * 1.04;
+  const anyShort = options.some((option) => option.totalW < needW);
+  // Words such as "short 19 kW" stand to the right of the need and want room there.
+  return anyShort ? Math.max(longest, needW / NEED_AT_MOST) : longest;
 }
 
 /** The heaters of one option end to end, against the need. */

@@ -1,5 +1,5 @@
 import type { UnitSystem } from "../../../server/engine/units.ts";
-import { counted, text } from "../../lib/format.ts";
+import { counted, lengthText } from "../../lib/format.ts";
 import { type Frame, frameFor, px, roofAt } from "./frame.ts";
 import { ScaleBar } from "./scale-bar.tsx";
 import type { SectionDimension, SectionShape } from "./section-shape.ts";
@@ -19,9 +19,9 @@ const layouts = {
   phone: {
     width: 390,
     height: 214,
-    widthShare: 0.52,
+    widthShare: 0.46,
     heightShare: 0.5,
-    centreShare: 0.48,
+    centreShare: 0.5,
     groundShare: 0.67,
   },
 } as const;
@@ -33,13 +33,15 @@ interface LineProps {
   y2: number;
   label: string;
   active: boolean;
+  /** Width of the whole drawing: the label is kept inside it. */
+  width: number;
 }
 
 /** A ticked dimension line with its label on a plate in the middle. */
-function DimensionLine({ x1, y1, x2, y2, label, active }: LineProps) {
+function DimensionLine({ x1, y1, x2, y2, label, active, width }: LineProps) {
   const colour = active ? "var(--color-redlead)" : "var(--color-ink-2)";
   const plate = label.length * (active ? 8.4 : 7.5) + 12;
-  const midX = (x1 + x2) / 2;
+  const midX = Math.min(width - plate / 2 - 3, Math.max(plate / 2 + 3, (x1 + x2) / 2));
   const midY = (y1 + y2) / 2;
   const tick = (x: number, y: number) => `M${px(x - 6)} ${px(y + 6)}L${px(x + 6)} ${px(y - 6)}`;
   return (
@@ -94,7 +96,7 @@ function Dimension({
           d={`M${px(from)} ${frame.groundY + 26}V${y + 8}M${px(to)} ${frame.groundY + 26}V${y + 8}`}
           {...extension}
         />
-        <DimensionLine x1={from} y1={y} x2={to} y2={y} label={label} active={active} />
+        <DimensionLine width={frame.width} x1={from} y1={y} x2={to} y2={y} label={label} active={active} />
       </>
     );
   }
@@ -106,7 +108,7 @@ function Dimension({
   return (
     <>
       <path d={`M${px(edge)} ${px(top)}H${px(left ? x - 8 : x + 8)}`} {...extension} />
-      <DimensionLine x1={x} y1={top} x2={x} y2={foot} label={label} active={active} />
+      <DimensionLine width={frame.width} x1={x} y1={top} x2={x} y2={foot} label={label} active={active} />
     </>
   );
 }
@@ -125,6 +127,7 @@ function RoofBow({ shape, frame, label }: { shape: SectionShape; frame: Frame; l
         strokeWidth="1.4"
       />
       <DimensionLine
+        width={frame.width}
         x1={frame.x(middle.x)}
         y1={frame.y(middle.y)}
         x2={frame.x(onRoof.x)}
@@ -144,7 +147,7 @@ function RoofBow({ shape, frame, label }: { shape: SectionShape; frame: Frame; l
 export function SectionSizes({ shape, shell, system, active, layout }: SectionSizesProps) {
   const fit = layouts[layout];
   const frame = frameFor(shape, fit);
-  const length = (metres: number) => text(metres, "length", system);
+  const length = (metres: number) => lengthText(metres, system);
   const phone = layout === "phone";
   const spoken = [
     ...shape.dimensions.map((d) => `${d.name} ${length(d.valueM)}`),

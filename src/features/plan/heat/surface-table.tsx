@@ -15,7 +15,7 @@ export function SurfaceTable({ balance, units }: { balance: HouseBalance; units:
       header: "Surface",
       names: true,
       cell: (row) => (
-        <span className="block py-1 leading-tight whitespace-normal">
+        <span className="block min-w-36 py-1 leading-tight whitespace-normal">
           {row.label}
           <span className="block text-xs text-ink-2">{row.assemblyName}</span>
         </span>

@@ -24,6 +24,22 @@ const examples: Partial<Record<ShapeType, SurveyShape>> = {
     ridgeHeight: metres(4.8),
     roofBow: metres(0.5),
   },
+  multiSpan: {
+    type: "multiSpan",
+    length: metres(30),
+    spanWidth: metres(4.6),
+    spanCount: metres(3),
+    gutterHeight: metres(3),
+    ridgeHeight: metres(4.6),
+  },
+  venlo: {
+    type: "venlo",
+    length: metres(30),
+    spanWidth: metres(3),
+    spanCount: metres(6),
+    gutterHeight: metres(4),
+    roofSlope: { typed: "24", unit: "deg", origin: "default" },
+  },
 };
 
 const plain: SurveyShape = {
