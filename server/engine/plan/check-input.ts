@@ -38,8 +38,8 @@ export function checkPlanInput(input: HousePlanInput): void {
       requireInRange("covers.uValueWM2K", assembly.uValueWM2K, 0.01, 15, "W/(m²·K)");
   checkScreen(input);
   input.heaters.forEach((heater, index) => {
-    requireInRange("heaters.ratedW", heater.ratedW, 0, 1e9, "W", index);
-    requireInRange("heaters.efficiencyFrac", heater.efficiencyFrac, 0.05, 6, "", index);
+    requireInRange("heaters.ratedW", heater.ratedW, 1, 1e8, "W", index);
+    requireInRange("heaters.efficiencyFrac", heater.efficiencyFrac, 0.1, 1.2, "", index);
     requireInRange("heaters.count", heater.count, 0, 10_000, "", index);
   });
 }

@@ -48,7 +48,7 @@ export function nightBalances(
   const air = houseAir(model, night.use);
   const hasScreen = input.screen !== null;
   const clear = clearNight(night.outdoorTempC, night.windMS);
-  const usualHour = hourOf(model, night, "screensShut", clear, hasScreen ? "shut" : "open", air);
+  const usualHour = usualHourOf(model, night, clear, air);
   const usual = houseBalance(model.designShell, usualHour);
   const states: Partial<Record<HouseStateId, HouseBalance>> = { screensShut: usual };
   if (!night.use.occupied) return states;
@@ -66,6 +66,17 @@ export function nightBalances(
   }
   if (night.unitOutputsW.length > 0) states.largestUnitOut = withLargestOut(model, night, usual, usualHour);
   return states;
+}
+
+/** The house on a design night as usual: screens shut, clear sky, all heaters running. Shape: model, night → balance. Source [DESIGNNIGHT]. */
+export function usualNight(model: HouseModel, night: NightInput): HouseBalance {
+  const clear = clearNight(night.outdoorTempC, night.windMS);
+  return houseBalance(model.designShell, usualHourOf(model, night, clear, houseAir(model, night.use)));
+}
+
+function usualHourOf(model: HouseModel, night: NightInput, clear: OutsideHour, air: HouseAir): BalanceHour {
+  const screen = model.input.screen === null ? "open" : "shut";
+  return hourOf(model, night, "screensShut", clear, screen, air);
 }
 
 function hourOf(

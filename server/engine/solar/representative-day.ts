@@ -5,6 +5,7 @@ import {
   dailyExtraterrestrialKwhM2,
   declinationDeg,
   distanceFactor,
+  equationOfTimeMin,
   sunsetHourAngleDeg,
 } from "./extraterrestrial.ts";
 import { representativeDayOfYear, type SunPosition, solarMidnightMs, sunPosition } from "./sun-position.ts";

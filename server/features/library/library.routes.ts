@@ -18,7 +18,10 @@ function buildLibrary(): LibraryView {
     solarTransmittance: stackTransmittance(row),
     layers: row.layers.map(({ name, thicknessMm }) => ({ name, thicknessMm })),
   }));
-  const animals = [...referenceData.animals.values()].map((row) => ({ ...row, ventilationM3HHead: row.perHeadM3H }));
+  const animals = [...referenceData.animals.values()].map((row) => ({
+    ...row,
+    ventilationM3HHead: row.perHeadM3H,
+  }));
   return {
     covers,
     animals,
