@@ -20,13 +20,17 @@ function number(text: string | undefined): number | null {
 /** Twelve values, or null when any is absent. */
 function series(row: Row, prefix: string, scale = 1): number[] | null {
   const values = months.map((month) => number(row[`${prefix}_${month}`]));
-  return values.every((value) => value !== null) ? values.map((value) => Number((value * scale).toFixed(6))) : null;
+  return values.every((value) => value !== null)
+    ? values.map((value) => Number((value * scale).toFixed(6)))
+    : null;
 }
 
 /** Borrowed values by station and quantity. */
 function fillIns(): Map<string, number[]> {
   const key = (row: Row) => `${row.id}/${row.variable}`;
-  return new Map(rowsOf("fill-ins.csv").map((row) => [key(row), months.map((month) => Number(row[`m${month}`]))]));
+  return new Map(
+    rowsOf("fill-ins.csv").map((row) => [key(row), months.map((month) => Number(row[`m${month}`]))]),
+  );
 }
 
 function flag(row: Row, name: string): ClimateFlag {
@@ -55,13 +59,18 @@ export function readStations(): StationRow[] {
   });
 }
 
-function climateOf(row: Row, borrowed: Map<string, number[]>, extreme: Row | undefined): StationRecord | null {
+function climateOf(
+  row: Row,
+  borrowed: Map<string, number[]>,
+  extreme: Row | undefined,
+): StationRecord | null {
   const meanTempC = series(row, "tmean");
   const maxTempC = series(row, "tmax");
   const minTempC = series(row, "tmin");
   if (meanTempC === null || maxTempC === null || minTempC === null) return null;
   const id = row.id ?? "";
-  const fill = (name: string, scale = 1) => borrowed.get(`${id}/${name}`)?.map((value) => value * scale) ?? null;
+  const fill = (name: string, scale = 1) =>
+    borrowed.get(`${id}/${name}`)?.map((value) => value * scale) ?? null;
   const measuredSun = series(row, "ghi");
   const estimatedSun = series(row, "ghi_est") ?? fill("ghi_est");
   const humidity = series(row, "rh", 0.01);

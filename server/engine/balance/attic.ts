@@ -37,7 +37,11 @@ export function ceilingFlux(
   const outOfAtticW = (tempC: number) => throughRoofW(tempC) + airWK * (tempC - outside.airTempC);
   const low = Math.min(insideTempC, outside.airTempC) - 40;
   const high = Math.max(insideTempC, outside.airTempC) + 60;
-  const atticTempC = findZero((tempC) => outOfAtticW(tempC) - intoAtticW(tempC), low, high);
+  const atticTempC = findZero((tempC) => outOfAtticW(tempC) - intoAtticW(tempC), {
+    low,
+    high,
+    guess: outside.airTempC + 0.15 * (insideTempC - outside.airTempC),
+  });
   const skyW = attic.parts.reduce(
     (sum, part) => sum + part.areaM2 * part.flux(atticTempC, outside, sunWM2).toSkyWM2,
     0,

@@ -56,14 +56,7 @@ export function houseBalance(shell: HouseShell, hour: BalanceHour): HouseBalance
   };
   const netW = losses.totalW - gainsW.sun - gainsW.stock - gainsW.lights;
   const surplusW = Math.max(0, -netW);
-  const shortageW = (insideC: number) =>
-    houseLosses(shell, shellHour, insideC).totalW -
-    hour.sunGainW -
-    hour.lightsW -
-    hour.stockSensibleW(insideC) -
-    hour.installedHeatW;
-  const settles =
-    netW <= hour.installedHeatW ? setpointC : settlesAtC(shortageW, setpointC, outside.airTempC);
+  const settles = settledC(shell, hour, shellHour, netW);
   return {
     month: hour.month,
     state: hour.state,
@@ -83,6 +76,43 @@ export function houseBalance(shell: HouseShell, hour: BalanceHour): HouseBalance
     settlesAtC: settles,
     installedHeatW: hour.installedHeatW,
     verdict: hour.occupied ? holdVerdict(settles, setpointC, hour.criticalTempC) : "notApplicable",
+  };
+}
+
+function settledC(shell: HouseShell, hour: BalanceHour, shellHour: ShellHour, netW: number): number {
+  const { setpointC, installedHeatW } = hour;
+  const shortageW = (insideC: number) =>
+    houseLosses(shell, shellHour, insideC).totalW -
+    hour.sunGainW -
+    hour.lightsW -
+    hour.stockSensibleW(insideC) -
+    installedHeatW;
+  const outdoorC = hour.outside.airTempC;
+  // In proportion: the house cools until its need has shrunk to the heat it has.
+  const guessC = outdoorC + (setpointC - outdoorC) * (installedHeatW / Math.max(netW, 1));
+  return settlesAtC(shortageW, netW - installedHeatW, setpointC, outdoorC, guessC);
+}
+
+/**
+ * The same hour with other heat fitted: nothing but where the house settles changes.
+ * Shape: shell, hour, its balance, heat W → balance. Source [DOWELL1971].
+ */
+export function withOtherHeat(
+  shell: HouseShell,
+  hour: BalanceHour,
+  balance: HouseBalance,
+  state: HouseStateId,
+  installedHeatW: number,
+): HouseBalance {
+  const changed = { ...hour, installedHeatW };
+  const shellHour = { outside: hour.outside, screen: hour.screen, air: hour.air, groupSunWM2: hour.groupSunWM2 };
+  const settles = settledC(shell, changed, shellHour, balance.requiredHeatW - balance.surplusW);
+  return {
+    ...balance,
+    state,
+    installedHeatW,
+    settlesAtC: settles,
+    verdict: hour.occupied ? holdVerdict(settles, hour.setpointC, hour.criticalTempC) : "notApplicable",
   };
 }
 

@@ -5,14 +5,22 @@ const BELOW_OUTSIDE_K = 25;
 
 /**
  * Temperature at which a house settles with the heat it has, never above the set-point. `shortageW(T)` is what is missing
- * to stay at T: losses less gains less installed heat; it rises with T.
- * Shape: function °C → W, set-point °C, outside °C → °C, to 1e-8 K. Source [DOWELL1971].
+ * to stay at T: losses less gains less installed heat; it rises with T. What is missing at the set-point is known already.
+ * Shape: function °C → W, shortage at the set-point W, set-point °C, outside °C, a first guess °C → °C. Source [DOWELL1971].
  */
 export function settlesAtC(
   shortageW: (insideTempC: number) => number,
+  shortageAtSetpointW: number,
   setpointC: number,
   outdoorTempC: number,
+  guessC: number,
 ): number {
-  if (shortageW(setpointC) <= 0) return setpointC;
-  return findZero(shortageW, Math.min(outdoorTempC, setpointC) - BELOW_OUTSIDE_K, setpointC);
+  if (shortageAtSetpointW <= 0) return setpointC;
+  const lowestC = Math.min(outdoorTempC, setpointC) - BELOW_OUTSIDE_K;
+  return findZero(shortageW, {
+    low: lowestC,
+    high: setpointC,
+    valueAtHigh: shortageAtSetpointW,
+    guess: Math.min(setpointC, Math.max(lowestC, guessC)),
+  });
 }

@@ -16,6 +16,9 @@ const NO_STOCK: StockHeat = {
   carbonDioxideM3H: 0,
 };
 
+/** Nearer to the inside temperature than this the fans follow warmth and no longer moisture, K. Source [BARNRULE]. */
+const MOISTURE_FROM_K = 10;
+
 export interface GovernedAir {
   air: AirFlows;
   governs: string;
@@ -70,21 +73,16 @@ export function houseAir(model: HouseModel, use: MonthUse): HouseAir {
         carbonDioxideM3H: heat.carbonDioxideM3H,
         insideTempC,
         humidityLimitFrac: stock.humidityLimitFrac,
-        outdoorTempC,
+        outdoorTempC: Math.min(outdoorTempC, insideTempC - MOISTURE_FROM_K),
         outdoorHumidityFrac: NIGHT_HUMIDITY_FRAC,
         pressurePa,
         carbonDioxideLimitPpm: stock.carbonDioxideLimitPpm,
         headCount: use.headCount,
         perHeadM3H: ventilation.perHeadM3H,
       });
-      return withFans(Math.min(minimum.flowM3H, mostFlowM3H(use.headCount)), minimum.governs);
+      return withFans(minimum.flowM3H, minimum.governs);
     },
   };
-}
-
-/** More than this per head is summer air and not asked for by moisture in winter, m³/h. Source [BARNRULE]. */
-function mostFlowM3H(headCount: number): number {
-  return 2000 * headCount;
 }
 
 function knownClass(classId: string): AnimalClass {

@@ -1,5 +1,5 @@
 import { dewPointC } from "../air/moist-air.ts";
-import { type BalanceHour, houseBalance } from "../balance/house-balance.ts";
+import { type BalanceHour, houseBalance, withOtherHeat } from "../balance/house-balance.ts";
 import type { OutsideHour, ScreenPosition } from "../balance/surface-model.ts";
 import { skyTemperatureC } from "../envelope/sky.ts";
 import { type GovernedAir, type HouseAir, houseAir, NIGHT_HUMIDITY_FRAC } from "./house-air.ts";
@@ -64,7 +64,14 @@ export function nightBalances(
       hourOf(model, night, "snowOnRoof", snow, "open", air),
     );
   }
-  if (night.unitOutputsW.length > 0) states.largestUnitOut = withLargestOut(model, night, usual, usualHour);
+  if (night.unitOutputsW.length > 0)
+    states.largestUnitOut = withOtherHeat(
+      model.designShell,
+      usualHour,
+      usual,
+      "largestUnitOut",
+      usualHour.installedHeatW - Math.max(...night.unitOutputsW),
+    );
   return states;
 }
 
@@ -110,18 +117,6 @@ function hourOf(
     stockSensibleW: (insideTempC) => air.stockAt(insideTempC).sensibleW,
     installedHeatW: night.unitOutputsW.reduce((sum, output) => sum + output, 0),
   };
-}
-
-/** Nothing but the heat fitted differs from the usual night, so the flows are taken over. */
-function withLargestOut(
-  model: HouseModel,
-  night: NightInput,
-  usual: HouseBalance,
-  usualHour: BalanceHour,
-): HouseBalance {
-  const installedHeatW = usualHour.installedHeatW - Math.max(...night.unitOutputsW);
-  if (usual.requiredHeatW <= installedHeatW) return { ...usual, state: "largestUnitOut", installedHeatW };
-  return houseBalance(model.designShell, { ...usualHour, state: "largestUnitOut", installedHeatW });
 }
 
 /**
