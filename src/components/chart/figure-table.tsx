@@ -42,7 +42,7 @@ export function FigureTable<Row>(props: FigureTableProps<Row>) {
     });
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a box that scrolls must be reachable by keyboard
-    <section className="overflow-x-auto" tabIndex={0} aria-label={caption}>
+    <div className="overflow-x-auto" tabIndex={0}>
       <table className="w-full border-collapse text-sm whitespace-nowrap">
         <caption className={showCaption ? "pb-1 text-left font-bold" : "sr-only"}>{caption}</caption>
         <thead>
@@ -75,6 +75,6 @@ export function FigureTable<Row>(props: FigureTableProps<Row>) {
           </tfoot>
         ) : null}
       </table>
-    </section>
+    </div>
   );
 }

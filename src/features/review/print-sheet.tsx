@@ -47,7 +47,7 @@ export function PrintSheet({ plan, library, units }: PrintSheetProps) {
     { name: "State", value: statusWords[plan.status] },
   ];
   return (
-    <div className="hidden text-[13px] leading-snug print:block">
+    <div className="hidden bg-sheet text-[13px] leading-snug [--color-limewash:var(--color-sheet)] print:block">
       <p className="m-0 flex justify-between border-b-2 border-ink pb-1 text-xs">
         <b>Glassbyre heat plan</b>
         <span>{`Plan ${plan.number}, ${plan.building.farmName}, ${day(plan.createdAt)}`}</span>
@@ -55,7 +55,7 @@ export function PrintSheet({ plan, library, units }: PrintSheetProps) {
       <h1 className="m-0 mt-3 font-sign text-2xl font-extrabold">{`${plan.building.name}, ${plan.building.farmName}`}</h1>
       <p className="m-0 text-base">{`${words.first} ${words.second}`}</p>
       {shape && balance && flows ? (
-        <figure className="m-0 mt-2 break-inside-avoid border border-ink">
+        <figure className="m-0 mt-2 break-inside-avoid border border-ink bg-sheet">
           <SectionHeat
             shape={shape}
             shell={shellOf(plan.survey, library?.covers)}

@@ -9,7 +9,7 @@ export function DerivedSizes({ survey, units }: { survey: Survey; units: Units }
     return (
       <p
         role="alert"
-        className="m-0 border-[1.5px] border-redlead bg-redlead-tint px-3 py-2 text-sm font-semibold"
+        className="m-0 self-start border-[1.5px] border-redlead bg-redlead-tint px-3 py-2 text-sm font-semibold"
       >
         {derived.problem}
       </p>
