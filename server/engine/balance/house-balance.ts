@@ -105,7 +105,12 @@ export function withOtherHeat(
   installedHeatW: number,
 ): HouseBalance {
   const changed = { ...hour, installedHeatW };
-  const shellHour = { outside: hour.outside, screen: hour.screen, air: hour.air, groupSunWM2: hour.groupSunWM2 };
+  const shellHour = {
+    outside: hour.outside,
+    screen: hour.screen,
+    air: hour.air,
+    groupSunWM2: hour.groupSunWM2,
+  };
   const settles = settledC(shell, changed, shellHour, balance.requiredHeatW - balance.surplusW);
   return {
     ...balance,
