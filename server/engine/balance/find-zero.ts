@@ -15,7 +15,7 @@ export interface ZeroSearch {
  * When the ends do not enclose a zero the nearer end is given back. Shape: function, search → x. Source [DOWELL1971].
  */
 export function findZero(rising: (x: number) => number, search: ZeroSearch): number {
-  const { low, high, guess, tolerance = 1e-7 } = search;
+  const { low, high, guess, tolerance = 1e-5 } = search;
   let b = high;
   let fb = search.valueAtHigh ?? rising(high);
   if (fb <= 0) return high;

@@ -69,23 +69,22 @@ function jumpFactor(hours: readonly RoomHour[], mass: RoomMass): number {
 /** One hour: mass by implicit Euler, air in balance, heater between nothing and its limit. */
 function runHour(hour: RoomHour, mass: RoomMass, massBeforeC: number, heaterLimitW: number) {
   const inertiaWK = mass.capacityJK / SECONDS_PER_HOUR;
-  const share = mass.couplingWK / (inertiaWK + mass.couplingWK);
   // Heat into the mass at inside temperature T is seriesWK · (T − drivingC).
-  const seriesWK = share * inertiaWK;
+  const seriesWK = (mass.couplingWK * inertiaWK) / (inertiaWK + mass.couplingWK);
   const drivingC = massBeforeC + hour.gainMassW / inertiaWK;
-  const excessW = (insideC: number) =>
-    hour.lossAtReferenceW +
-    hour.lossPerInsideWK * (insideC - hour.referenceC) +
-    seriesWK * (insideC - drivingC) -
-    hour.gainAirW;
   const slopeWK = hour.lossPerInsideWK + seriesWK;
-  const neededW = Math.max(0, excessW(hour.setpointC));
+  const shortAtSetpointW =
+    hour.lossAtReferenceW +
+    hour.lossPerInsideWK * (hour.setpointC - hour.referenceC) +
+    seriesWK * (hour.setpointC - drivingC) -
+    hour.gainAirW;
+  const neededW = Math.max(0, shortAtSetpointW);
   const heaterW = Math.min(neededW, heaterLimitW);
-  let insideTempC = hour.setpointC - (excessW(hour.setpointC) - heaterW) / slopeWK;
+  let insideTempC = hour.setpointC - (shortAtSetpointW - heaterW) / slopeWK;
   let ventedW = 0;
   if (insideTempC > hour.ventAtC) {
+    ventedW = slopeWK * (insideTempC - hour.ventAtC);
     insideTempC = hour.ventAtC;
-    ventedW = Math.max(0, -excessW(insideTempC));
   }
   const massTempC =
     (inertiaWK * massBeforeC + mass.couplingWK * insideTempC + hour.gainMassW) /

@@ -2,11 +2,9 @@ import type { GainPath, LossPath, MonthEnergy } from "../plan/plan-types.ts";
 import type { RoomHourResult } from "./day-run.ts";
 import type { SplitRoomHour } from "./room-hours.ts";
 
-const LOSS_PATHS: readonly LossPath[] = ["cover", "sky", "air", "ground"];
-const GAIN_PATHS: readonly GainPath[] = ["sun", "stock", "lights"];
 /** A room less than this below its set-point still counts as held, K. Source [THERMOSTAT]. */
 const HELD_WITHIN_K = 0.5;
-/** A heater that gives less than this share of nothing is off, W. */
+/** A heater that gives less is off, W. */
 const HEATING_ABOVE_W = 1;
 
 /** Adds typical days up to a month. */
@@ -35,12 +33,21 @@ export class EnergySum {
   }
 
   private addHour(hour: SplitRoomHour, result: RoomHourResult, index: number, days: number): void {
-    const losses = hour.lossesAtW(result.insideTempC);
-    const lossW = LOSS_PATHS.reduce((sum, path) => sum + losses[path], 0);
+    const insideC = result.insideTempC;
+    const lossW = hour.lossAtReferenceW + hour.lossPerInsideWK * (insideC - hour.referenceC);
     // Heat that comes in through a warm shell and leaves with the air again is neither loss nor gain.
     const passing = lossW < 0;
-    if (!passing) for (const path of LOSS_PATHS) this.losses[path] += losses[path] * days;
-    for (const path of GAIN_PATHS) this.gains[path] += hour.gainsW[path] * days;
+    if (!passing) {
+      const airW = hour.airWK * (insideC - hour.outdoorTempC);
+      const groundW = hour.groundWK * (insideC - hour.outdoorTempC);
+      this.losses.air += airW * days;
+      this.losses.ground += groundW * days;
+      this.losses.sky += hour.skyW * days;
+      this.losses.cover += (lossW - airW - groundW - hour.skyW) * days;
+    }
+    this.gains.sun += hour.gainsW.sun * days;
+    this.gains.stock += hour.gainsW.stock * days;
+    this.gains.lights += hour.gainsW.lights * days;
     this.vented += Math.max(0, result.ventedW + (passing ? lossW : 0)) * days;
     this.heater += result.heaterW * days;
     this.unmet += (result.neededW - result.heaterW) * days;
@@ -53,7 +60,7 @@ export class EnergySum {
 
   result(days: number): MonthEnergy {
     const kwh = (wattHours: number) => wattHours / 1000;
-    const gainsTotal = GAIN_PATHS.reduce((sum, path) => sum + this.gains[path], 0);
+    const gainsTotal = this.gains.sun + this.gains.stock + this.gains.lights;
     const used = gainsTotal > 0 ? Math.max(0, 1 - this.vented / gainsTotal) : 0;
     return {
       heaterKwh: kwh(this.heater),

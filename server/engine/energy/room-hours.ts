@@ -1,7 +1,7 @@
 import { airHeatWK } from "../balance/air-heat.ts";
 import type { AirFlows } from "../balance/house-losses.ts";
 import { heatRecoveryFrac } from "../livestock/minimum-ventilation.ts";
-import type { GainPath, LossPath } from "../plan/plan-types.ts";
+import type { GainPath } from "../plan/plan-types.ts";
 import type { RoomHour } from "./day-run.ts";
 import type { MonthEnergyInput, Responses } from "./month-energy.ts";
 import { parabolaAt } from "./parabola.ts";
@@ -14,8 +14,10 @@ export type RoomAir = (insideTempC: number, outdoorTempC: number) => AirFlows;
 export interface SplitRoomHour extends RoomHour {
   outdoorTempC: number;
   gainsW: Record<GainPath, number>;
-  /** Loss by path at an inside temperature. */
-  lossesAtW(insideTempC: number): Record<LossPath, number>;
+  /** Radiated to the sky, W; loss by air and floor edge for each kelvin, W/K. What is left leaves through the cover. */
+  skyW: number;
+  airWK: number;
+  groundWK: number;
   innerFaceC: number;
 }
 
@@ -64,12 +66,9 @@ export function roomHours(
       setpointC,
       ventAtC: Math.max(input.daySetpointC, input.nightSetpointC) + input.ventAboveK,
       innerFaceC: parabolaAt(response.innerFaceC, outdoorTempC),
-      lossesAtW: (insideTempC) => ({
-        cover: surfacesW + response.lossPerInsideWK * (insideTempC - setpointC) - skyW,
-        sky: skyW,
-        air: airWK * (insideTempC - outdoorTempC),
-        ground: groundWK * (insideTempC - outdoorTempC),
-      }),
+      skyW,
+      airWK,
+      groundWK,
     };
   });
 }
