@@ -4,6 +4,7 @@ import type { Contents } from "./contents.tsx";
 import type { Shell } from "./shell.tsx";
 
 const OPAQUE = 0.05;
+const LEAST_GAP_MM = 3;
 
 const animalsByWord: [RegExp, Contents][] = [
   [/chick|hen|broiler|layer|turkey|poult|pullet|bird|duck|goose/, "birds"],
@@ -22,10 +23,12 @@ export function shellOf(survey: Survey, covers: CoverEntry[] | undefined): Shell
   const part =
     survey.shape.type === "atticBarn" ? (survey.covers.ceiling ?? survey.covers.roof) : survey.covers.roof;
   const cover = covers?.find((entry) => entry.id === part.cover.value);
-  const thicknessMm = cover?.layers.reduce((sum, layer) => sum + (layer.thicknessMm ?? 0), 0) ?? 0;
+  const solidMm = cover?.layers.reduce((sum, layer) => sum + (layer.thicknessMm ?? 0), 0) ?? 0;
+  // The library lists solid layers only; two of them stand apart by a gap of which the drawing shows the least it can.
+  const thicknessMm = cover && cover.layers.length > 1 ? Math.max(solidMm, LEAST_GAP_MM) : solidMm;
   return {
     thicknessM: thicknessMm / 1000,
-    insulated: cover ? cover.solarTransmittance < OPAQUE && thicknessMm > 10 : survey.use.kind === "barn",
+    insulated: cover ? cover.solarTransmittance < OPAQUE && solidMm > 10 : survey.use.kind === "barn",
     contents: contentsOf(survey.use),
     screen: survey.screen ? "shut" : null,
   };

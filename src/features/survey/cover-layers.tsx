@@ -2,7 +2,7 @@ import type { CoverEntry } from "../../../server/contracts/library.ts";
 import type { Survey } from "../../../server/contracts/survey.ts";
 import { number } from "../../lib/format.ts";
 
-/** The layers of the roof, outside to inside, as the library has them. */
+/** The solid layers of the roof; the library lists them from the room outwards. */
 export function CoverLayers({ survey, covers }: { survey: Survey; covers: CoverEntry[] }) {
   const part = survey.covers.roof;
   const cover = covers.find((entry) => entry.id === part.cover.value);
@@ -28,7 +28,7 @@ export function CoverLayers({ survey, covers }: { survey: Survey; covers: CoverE
           </tr>
         </thead>
         <tbody>
-          {cover.layers.map((layer, i) => (
+          {[...cover.layers].reverse().map((layer, i) => (
             // biome-ignore lint/suspicious/noArrayIndexKey: layers have no other name than their place
             <tr key={i} className="border-b border-rule">
               <th scope="row" className="py-1.5 text-left font-bold">

@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { countAnswers } from "../../../server/contracts/answered.ts";
 import { shapeTypes } from "../../../server/contracts/buildings.ts";
 import { surveySchema } from "../../../server/contracts/survey.ts";
 import { answeredIn, countChanges } from "../../../src/features/survey/answers.ts";
@@ -26,6 +27,12 @@ describe("answers", () => {
   test("a typical value is a question nobody has answered", () => {
     const shape = surveySections.find((section) => section.id === "shape");
     expect(answeredIn(shape?.parts(survey) ?? [])).toEqual({ answered: 5, questions: 6 });
+  });
+
+  test("the groups count what the server counts", () => {
+    const all = answeredIn(surveySections.flatMap((section) => section.parts(survey)));
+    const { answered, questions } = countAnswers(survey);
+    expect(all).toEqual({ answered, questions });
   });
 
   test("every answer of a survey belongs to a group that asks for it", () => {

@@ -6,7 +6,7 @@ import { SurveyChoice } from "../fields/survey-choice.tsx";
 import { SurveyQuantity } from "../fields/survey-quantity.tsx";
 import { SurveyReference } from "../fields/survey-reference.tsx";
 import { useSurveyForm } from "../form-context.ts";
-import { freshCeiling, freshKneewall, freshScreen } from "../fresh-parts.ts";
+import { freshKneewall, freshScreen } from "../fresh-parts.ts";
 import { UValueOverride } from "./u-value-override.tsx";
 
 type Part = CoverEntry["parts"][number];
@@ -56,13 +56,8 @@ export function CoverSection() {
           <UValueOverride name={`covers.${part}.uValue`} of={of} startWM2K={uOf(covers[part].cover.value)} />
         </div>
       ))}
-      {shapeType === "atticBarn" || covers.ceiling ? (
-        <OptionalPart
-          name="covers.ceiling"
-          add="Add a flat ceiling"
-          remove="No flat ceiling"
-          fresh={() => freshCeiling(library)}
-        >
+      {shapeType === "atticBarn" && covers.ceiling ? (
+        <>
           <SurveyReference
             name="covers.ceiling.cover"
             label="Flat ceiling"
@@ -72,9 +67,9 @@ export function CoverSection() {
           <UValueOverride
             name="covers.ceiling.uValue"
             of="ceiling"
-            startWM2K={uOf(covers.ceiling?.cover.value)}
+            startWM2K={uOf(covers.ceiling.cover.value)}
           />
-        </OptionalPart>
+        </>
       ) : null}
       <OptionalPart
         name="covers.kneewall"

@@ -12,6 +12,11 @@ export interface SurveySection {
   paths: string[];
 }
 
+/** A column of the calendar is one question: one month that a person has looked at answers it. */
+function column(survey: Survey, key: "nightSetpoint" | "daySetpoint" | "headCount" | "mass"): unknown {
+  return survey.months.find((month) => month[key].origin !== "default")?.[key] ?? survey.months[0]?.[key];
+}
+
 export const surveySections: SurveySection[] = [
   {
     id: "shape",
@@ -49,16 +54,13 @@ export const surveySections: SurveySection[] = [
     parts: (survey) =>
       survey.use.kind === "greenhouse"
         ? [survey.use]
-        : [survey.use.animal, survey.months.map(({ headCount, mass }) => ({ headCount, mass }))],
+        : [survey.use.animal, column(survey, "headCount"), column(survey, "mass")],
     paths: ["use.crop", "use.lamps", "use.lampHours", "use.animal"],
   },
   {
     id: "temperatures",
     title: "Temperatures wanted",
-    parts: (survey) => [
-      survey.criticalTemp,
-      survey.months.map(({ nightSetpoint, daySetpoint }) => ({ nightSetpoint, daySetpoint })),
-    ],
+    parts: (survey) => [survey.criticalTemp, column(survey, "nightSetpoint"), column(survey, "daySetpoint")],
     paths: ["criticalTemp", "months"],
   },
   {

@@ -1,11 +1,12 @@
-import { useController, useWatch } from "react-hook-form";
+import { useController, useFormContext, useWatch } from "react-hook-form";
 import { shapeTypes } from "../../../../server/contracts/buildings.ts";
-import type { SurveyShape } from "../../../../server/contracts/survey.ts";
+import type { Survey, SurveyShape } from "../../../../server/contracts/survey.ts";
 import { ChoiceButtons } from "../../../components/form/choice-buttons.tsx";
 import { shapeNames } from "../../../components/plan/shape-names.ts";
 import { changeShape } from "../change-shape.ts";
 import { SurveyQuantity } from "../fields/survey-quantity.tsx";
 import { type SurveyPath, useSurveyForm } from "../form-context.ts";
+import { freshCeiling } from "../fresh-parts.ts";
 import { ShapePicture } from "./shape-picture.tsx";
 
 interface Ask {
@@ -52,9 +53,16 @@ const asked: Record<SurveyShape["type"], Ask[]> = {
 
 /** Shape, its measures, and which way the ridge runs. */
 export function ShapeSection() {
-  const { control, disabled } = useSurveyForm();
+  const { control, disabled, library } = useSurveyForm();
+  const { getValues, setValue } = useFormContext<Survey>();
   const { field } = useController({ name: "shape", control });
   const shape = useWatch({ control, name: "shape" });
+  const change = (type: SurveyShape["type"]) => {
+    field.onChange(changeShape(shape, type));
+    // Only a barn with an attic has a ceiling of its own, and it always has one.
+    const ceiling = type === "atticBarn" ? (getValues("covers.ceiling") ?? freshCeiling(library)) : null;
+    setValue("covers.ceiling", ceiling, { shouldDirty: true, shouldValidate: true });
+  };
   return (
     <>
       <div className="px-4 pt-2 pb-3 md:px-0">
@@ -63,7 +71,7 @@ export function ShapeSection() {
           name="shape-type"
           value={shape.type}
           disabled={disabled}
-          onChange={(type) => field.onChange(changeShape(shape, type))}
+          onChange={change}
           options={shapeTypes.map((type) => ({
             value: type,
             label: shapeNames[type],
