@@ -1,0 +1,1 @@
+export { FarmScreen as Component } from "../../features/farms/farm-screen.tsx";

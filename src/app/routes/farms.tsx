@@ -1,0 +1,1 @@
+export { FarmsScreen as Component } from "../../features/farms/farms-screen.tsx";

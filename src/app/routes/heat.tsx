@@ -1,0 +1,1 @@
+export { HeatScreen as Component } from "../../features/plan/heat-screen.tsx";

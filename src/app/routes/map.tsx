@@ -1,0 +1,1 @@
+export { MapScreen as Component } from "../../features/map/map-screen.tsx";

@@ -1,0 +1,1 @@
+export { NoAccessScreen as Component } from "../../features/session/no-access-screen.tsx";

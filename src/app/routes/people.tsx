@@ -1,0 +1,1 @@
+export { PeopleScreen as Component } from "../../features/people/people-screen.tsx";

@@ -1,0 +1,1 @@
+export { PinScreen as Component } from "../../features/map/pin-screen.tsx";

@@ -1,0 +1,1 @@
+export { ReviewScreen as Component } from "../../features/review/review-screen.tsx";

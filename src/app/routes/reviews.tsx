@@ -1,0 +1,1 @@
+export { ReviewsScreen as Component } from "../../features/review/reviews-screen.tsx";

@@ -1,0 +1,1 @@
+export { SignInScreen as Component } from "../../features/session/sign-in-screen.tsx";

@@ -1,0 +1,1 @@
+export { SitesScreen as Component } from "../../features/sites/sites-screen.tsx";

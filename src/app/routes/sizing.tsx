@@ -1,0 +1,1 @@
+export { SizingScreen as Component } from "../../features/plan/sizing-screen.tsx";

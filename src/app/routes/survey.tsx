@@ -1,0 +1,1 @@
+export { SurveyScreen as Component } from "../../features/survey/survey-screen.tsx";
