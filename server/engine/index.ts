@@ -34,4 +34,152 @@ export { ENGINE_VERSION } from "./version.ts";
 
 // -- climate
 
+// Degree-days to any base by three methods, and the mean shortfall of a normally distributed temperature.
+export {
+  degreeDaysErbs,
+  degreeDaysHitchin,
+  degreeDaysNormal,
+  meanShortfallK,
+} from "./climate/degree-days.ts";
+// Design temperatures: yearly percentiles, their spread over the months, one month on its own.
+export {
+  annualPercentileFromMonthsC,
+  DAYS_IN_MONTH,
+  monthlyDesignTempsC,
+  monthPercentileTempC,
+} from "./climate/design-temperature.ts";
+// The coldest night once in N years.
+export {
+  onceInYearsTempC,
+  returnPeriodFactor,
+  TYPICAL_YEARLY_MIN_SPREAD_K,
+  yearlyMinSpreadK,
+} from "./climate/extremes.ts";
+export type { FigureOrigin, FilledMonths } from "./climate/fill-missing.ts";
+// Gaps of a station filled by stated rules, each with its origin.
+export { fillMissingMonths } from "./climate/fill-missing.ts";
+// Spread of hourly and daily temperatures from range and swing.
+export { hourlySpreadK, typicalDailySpreadK } from "./climate/hourly-spread.ts";
+export type { RankedStation, StationPlace } from "./climate/nearest-station.ts";
+// Distance on the globe, and the nearest stations with height counted in.
+export { greatCircleKm, nearestStations } from "./climate/nearest-station.ts";
+// The normal distribution the climate methods stand on.
+export { normalDensity, normalQuantile, normalShareBelow } from "./climate/normal-distribution.ts";
+export type { RepresentativeDay } from "./climate/representative-days.ts";
+// Typical days that keep a month's mean, spread and daily range.
+export { diurnalDeviationsK, equalShareClasses, representativeDays } from "./climate/representative-days.ts";
+export type { SiteClimate, YearlyDesign } from "./climate/site-climate.ts";
+// A station's normals brought to a site, with both design temperatures of every month.
+export { siteClimate, yearlyEverydayDesign, yearlyExtremeDesign } from "./climate/site-climate.ts";
+export type { Shelter, SiteCorrection } from "./climate/site-correction.ts";
+// Correction for height and frost hollow with reasons, wind at the eave.
+export { LAPSE_RATE_KM, siteCorrection, windAtEaveMS } from "./climate/site-correction.ts";
+export type { ClimateFlag, StationClimate } from "./climate/station-climate.ts";
+
 // -- house balance, months, sizing, plan
+
+// Heat carried by air, by height.
+export { AIR_HEAT_WHM3K, airHeatWK } from "./balance/air-heat.ts";
+export type { AtticPart, AtticSpace } from "./balance/attic.ts";
+// A ceiling under a cold attic.
+export { ATTIC_AIR_CHANGES_PER_HOUR, ceilingFlux } from "./balance/attic.ts";
+export type { ZeroSearch } from "./balance/find-zero.ts";
+// Zero of a rising function.
+export { findZero } from "./balance/find-zero.ts";
+export type { BalanceHour } from "./balance/house-balance.ts";
+// The house at one steady hour: every path, the heat needed, where it settles.
+export { houseBalance, withOtherHeat } from "./balance/house-balance.ts";
+export type { AirFlows, HouseLosses, HouseShell, ShellHour } from "./balance/house-losses.ts";
+// Losses of a house by path.
+export { houseLosses } from "./balance/house-losses.ts";
+export type { ShellInput } from "./balance/prepare-shell.ts";
+// A house's surfaces with cover, view and screen made ready for many hours.
+export { coverIsWet, prepareShell } from "./balance/prepare-shell.ts";
+// Air past a closed screen.
+export { screenLeakageM3HM2 } from "./balance/screen-air.ts";
+// Settling temperature and verdict.
+export { settlesAtC } from "./balance/settle.ts";
+// A solid ceiling's U-value.
+export { ceilingUValueWM2K } from "./balance/stack-resistance.ts";
+export type { StackSurface } from "./balance/stack-surface.ts";
+export { prepareStackFlux } from "./balance/stack-surface.ts";
+export type {
+  FluxGroup,
+  OutsideHour,
+  ScreenPosition,
+  SurfaceFlux,
+  SurfaceModel,
+} from "./balance/surface-model.ts";
+export type { TypedRule } from "./balance/typed-surface.ts";
+// Covers given as one U-value: wind, screen, share to the sky.
+export { screenedUValueWM2K, typedFlux } from "./balance/typed-surface.ts";
+export {
+  outsideFilmWM2K,
+  skyShareOfTypedLossFrac,
+  TABLE_WIND_MS,
+  uValueAtWindWM2K,
+} from "./balance/typed-u-value.ts";
+export { HOLDS_WITHIN_K, holdVerdict } from "./balance/verdict.ts";
+export type { OutsideView } from "./balance/view.ts";
+export { outsideView } from "./balance/view.ts";
+export type { RoomHour, RoomHourResult, RoomMass } from "./energy/day-run.ts";
+// A typical day run until it repeats itself, with one mass node and a heater limit.
+export { runTypicalDay } from "./energy/day-run.ts";
+export type { MonthEnergyInput } from "./energy/month-energy.ts";
+// Energy of a month from typical days.
+export { monthEnergy } from "./energy/month-energy.ts";
+export type { MonthSun, MonthSunInput } from "./energy/month-sun.ts";
+// Sun on the surfaces and into the room through a month's mean day.
+export { monthSun } from "./energy/month-sun.ts";
+export type { Parabola } from "./energy/parabola.ts";
+export { parabolaAt, parabolaThrough } from "./energy/parabola.ts";
+export type { ShellResponse } from "./energy/shell-response.ts";
+// How a shell answers to a month's weather.
+export { responseLossW, shellResponse } from "./energy/shell-response.ts";
+export type { GovernedAir, HouseAir } from "./plan/house-air.ts";
+// Air and stock of a house in one month.
+export { houseAir } from "./plan/house-air.ts";
+export type {
+  Assembly,
+  CropInput,
+  FuelInput,
+  HeaterInput,
+  HousePart,
+  HousePlanInput,
+  MonthUse,
+  ScreenInput,
+  StockInput,
+} from "./plan/house-input.ts";
+export type { HouseModel } from "./plan/house-model.ts";
+// A house's sizes and shells, worked out once.
+export { houseModel } from "./plan/house-model.ts";
+export type { NightInput } from "./plan/night-balances.ts";
+// A design night in every state that matters.
+export { nightBalances, usualNight } from "./plan/night-balances.ts";
+// The whole plan of a house.
+export { planHouse } from "./plan/plan-house.ts";
+export type {
+  GainPath,
+  HoldVerdict,
+  HouseBalance,
+  HouseStateId,
+  InputOrigin,
+  LossPath,
+  MonthClimate,
+  MonthEnergy,
+  MonthResult,
+  PlanAssumption,
+  PlanResult,
+  PlanSizing,
+  PlanWarning,
+  SurfaceFlow,
+} from "./plan/plan-types.ts";
+export type { HeaterOption, HeaterUnit } from "./plan/sizing-types.ts";
+export type { CoolingHouse, HoursRange } from "./sizing/hours-to-critical.ts";
+// Hours until the critical temperature when all heat stops.
+export { hoursToCritical } from "./sizing/hours-to-critical.ts";
+// Fitted heaters by what they really give.
+export { installedUnits, totalOutputW, unitOutputsW } from "./sizing/installed-units.ts";
+export type { OptionJudge } from "./sizing/judge-options.ts";
+// Ways of fitting a house, each judged on both nights.
+export { judgedOptions } from "./sizing/judge-options.ts";
