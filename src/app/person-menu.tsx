@@ -27,16 +27,16 @@ function useCloseOutside() {
       const inside = event.target instanceof Node && menu.current?.contains(event.target);
       if (menu.current && !inside) menu.current.open = false;
     };
-    const escape = (event: KeyboardEvent) => {
+    const closeOnEscape = (event: KeyboardEvent) => {
       if (event.key !== "Escape" || !menu.current?.open) return;
       menu.current.open = false;
       menu.current.querySelector("summary")?.focus();
     };
     document.addEventListener("pointerdown", close);
-    document.addEventListener("keydown", escape);
+    document.addEventListener("keydown", closeOnEscape);
     return () => {
       document.removeEventListener("pointerdown", close);
-      document.removeEventListener("keydown", escape);
+      document.removeEventListener("keydown", closeOnEscape);
     };
   }, []);
   return menu;
