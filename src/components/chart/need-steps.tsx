@@ -34,6 +34,13 @@ interface NeedStepsProps {
 
 const words = { fill: "var(--color-ink)", fontSize: 13, fontWeight: 650 };
 
+/** Place of the month in the middle of those that ask for least. */
+function lowestMonth(needs: number[]): number {
+  const least = Math.min(...needs);
+  const low = [...needs.keys()].filter((i) => (needs[i] ?? 0) <= least * 1.05 + 1e-9);
+  return low[Math.floor(low.length / 2)] ?? 0;
+}
+
 /** Month by month, what the cold night asks for against what is fitted. The missing part is hatched. */
 export function NeedStepsChart(props: NeedStepsProps) {
   const { data, unit, installedWords, proposedWords, height = 330, width } = props;
@@ -53,7 +60,7 @@ export function NeedStepsChart(props: NeedStepsProps) {
   const worstShort = (onceInYears[worst] ?? 0) - installed;
   const decimals = top < 20 ? 1 : 0;
   // The month that asks for least leaves the most room for words.
-  const wordsAt = (onceInYears.indexOf(Math.min(...onceInYears)) + 0.5) / 12;
+  const wordsAt = (lowestMonth(onceInYears) + 0.5) / 12;
   const chart = (
     <ComposedChart
       {...(width === undefined ? {} : { width, height })}
@@ -150,7 +157,7 @@ export function NeedStepsChart(props: NeedStepsProps) {
           x={month + 0.5}
           y={need}
           r={0}
-          label={{ value: number(need, decimals), position: "top", ...words }}
+          label={{ value: need > 0 ? number(need, decimals) : "\u2013", position: "top", ...words }}
         />
       ))}
       {worstShort > 0 && installed > 0 ? (

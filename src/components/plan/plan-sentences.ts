@@ -39,8 +39,8 @@ export function headline(name: string, result: PlanResult, units: Units): { firs
   if (missing > 0) {
     const everyday =
       sizing.verdictEveryday === "holds"
-        ? "An ordinary cold night holds."
-        : "An ordinary cold night does not hold either.";
+        ? "On an ordinary cold night it holds."
+        : "On an ordinary cold night it does not hold either.";
     return {
       first: `${name} is ${units.heat(missing)} short on ${night}.`,
       second: `${need} is needed in ${monthName(sizing.onceInYearsMonth)} and ${have} is fitted. The house would settle at about ${units.roundTemperature(sizing.settlesAtOnceInYearsC)} and not at ${units.roundTemperature(governingSetpointC(result))}. ${everyday}`,

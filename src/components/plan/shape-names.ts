@@ -5,7 +5,7 @@ export const shapeNames: Record<ShapeType, string> = {
   gothicArch: "Gothic arch",
   gable: "Gable",
   multiSpan: "Multi-span",
-  venlo: "Small spans",
+  venlo: "Venlo type",
   monoPitch: "Lean-to",
   atticBarn: "Gable, attic",
 };

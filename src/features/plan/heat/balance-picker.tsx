@@ -21,6 +21,7 @@ export function BalancePicker({ result, selection, hasScreen, onSelect, units }:
     const entry = result.months[index];
     if (!entry) return "";
     const needW = selection.night === "everyday" ? entry.everydayRequiredW : entry.onceInYearsRequiredW;
+    if (needW <= 0) return "\u2013";
     return units.figure(needW, "power", { decimals: units.amount(needW, "power") < 10 ? 1 : 0 }).value;
   };
   return (
@@ -35,7 +36,7 @@ export function BalancePicker({ result, selection, hasScreen, onSelect, units }:
           return (
             <label
               key={entry.month}
-              className={`flex min-h-12 cursor-pointer items-center justify-between border-r border-b border-rule-strong px-2.5 text-sm has-focus-visible:z-1 has-focus-visible:outline-3 has-focus-visible:outline-focus ${chosen ? "bg-ink text-sheet" : "bg-sheet hover:bg-trough"}`}
+              className={`flex min-h-12 cursor-pointer flex-wrap content-center items-center justify-between border-r border-b border-rule-strong px-2.5 text-sm has-focus-visible:z-1 has-focus-visible:outline-3 has-focus-visible:outline-focus ${chosen ? "bg-ink text-sheet" : "bg-sheet hover:bg-trough"}`}
             >
               <input
                 type="radio"

@@ -33,7 +33,10 @@ export function whyFlow(path: HeatPath, balance: HouseBalance, units: Units): Wh
     case "cover":
       return {
         method:
-          "For each surface: heat moves from the room to the inner face, through the layers, and from the outer face to the outside air. The part radiated to the sky is listed apart.",
+          "For each surface: heat moves from the room to the inner face, through the layers, and from the outer face to the outside air. The part radiated to the sky is listed apart." +
+          (balance.lossesW.cover < 0
+            ? " Here the outer faces are colder than the outside air, because the sky draws so much: the air warms them, and the amount is below nothing."
+            : ""),
         parts: [inside, outside, step, ...surfaces],
         restsOn: ["covers", "screen", "shape", "shelter"],
       };

@@ -1,0 +1,83 @@
+import { useQuery } from "@tanstack/react-query";
+import { useState } from "react";
+import { Link, Navigate, useNavigate } from "react-router-dom";
+import type { FarmView } from "../../../server/contracts/farms.ts";
+import { Button } from "../../components/button.tsx";
+import { PageState } from "../../components/page-state.tsx";
+import { farmsQuery } from "../../lib/farms-query.ts";
+import { counted } from "../../lib/format.ts";
+import { meQuery } from "../../lib/me-query.ts";
+import { NewFarmForm } from "./new-farm-form.tsx";
+
+function FarmLine({ farm }: { farm: FarmView }) {
+  const named = (role: "advisor" | "farmer") =>
+    farm.people
+      .filter((person) => person.role === role)
+      .map((person) => person.name)
+      .join(", ");
+  return (
+    <li className="border-b border-rule">
+      <Link
+        to={`/farms/${farm.id}`}
+        className="grid min-h-14 items-center gap-x-6 bg-sheet px-4 py-2 text-ink no-underline hover:bg-trough md:grid-cols-[2fr_1fr_2fr]"
+      >
+        <span>
+          <b className="block font-sign text-lg">{farm.name}</b>
+          <span className="block text-sm text-ink-2">{farm.place}</span>
+        </span>
+        <span>{counted(farm.buildingCount, "building")}</span>
+        <span className="text-sm text-ink-2">
+          {`${named("farmer") || "no farmer yet"}; advised by ${named("advisor") || "nobody yet"}`}
+        </span>
+      </Link>
+    </li>
+  );
+}
+
+/** Farms the person may see. A farmer with one farm goes straight to it. */
+export function FarmsScreen() {
+  const navigate = useNavigate();
+  const { data: me } = useQuery(meQuery);
+  const farms = useQuery(farmsQuery);
+  const [adding, setAdding] = useState(false);
+  if (farms.isError && farms.data === undefined) {
+    return <PageState kind="error" error={farms.error} onRetry={() => void farms.refetch()} />;
+  }
+  if (farms.data === undefined || me === undefined) return <PageState kind="loading" />;
+  const [only] = farms.data;
+  if (me.activeRole === "farmer" && farms.data.length === 1 && only !== undefined) {
+    return <Navigate to={`/farms/${only.id}`} replace />;
+  }
+  const mayAdd = me.activeRole === "advisor" && me.activeCooperativeId !== null;
+  return (
+    <div className="mx-auto w-full max-w-[1180px] px-4 py-6 md:px-8">
+      <div className="flex flex-wrap items-center justify-between gap-4 border-b-2 border-ink pb-3">
+        <h1 className="m-0 font-sign text-2xl font-extrabold">
+          {farms.data.length === 0 ? "No farms yet" : counted(farms.data.length, "farm")}
+        </h1>
+        {mayAdd && !adding ? <Button onClick={() => setAdding(true)}>Add a farm</Button> : null}
+      </div>
+      {adding && me.activeCooperativeId !== null ? (
+        <div className="mt-5">
+          <NewFarmForm
+            cooperativeId={me.activeCooperativeId}
+            onCreated={(farm) => navigate(`/farms/${farm.id}`)}
+            onCancel={() => setAdding(false)}
+          />
+        </div>
+      ) : null}
+      {farms.data.length === 0 && !adding ? (
+        <p className="max-w-[60ch]">
+          {mayAdd
+            ? "Add the first farm, then pin its buildings on the map."
+            : "Farms show here once an adviser of the co-operative has added them."}
+        </p>
+      ) : null}
+      <ul className="m-0 list-none p-0">
+        {farms.data.map((farm) => (
+          <FarmLine key={farm.id} farm={farm} />
+        ))}
+      </ul>
+    </div>
+  );
+}
