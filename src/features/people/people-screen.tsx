@@ -10,7 +10,10 @@ import { meQuery } from "../../lib/me-query.ts";
 import { peopleQuery } from "../../lib/people-query.ts";
 
 const roleWords: Record<Role, string> = { advisor: "Adviser", farmer: "Farmer", manager: "Manager" };
-const roleOptions = (Object.keys(roleWords) as Role[]).map((value) => ({ value, label: roleWords[value] }));
+const roleOptions: { value: Role; label: string }[] = (["advisor", "farmer", "manager"] as const).map((value) => ({
+  value,
+  label: roleWords[value],
+}));
 
 function InviteForm({ cooperativeId }: { cooperativeId: string }) {
   const client = useQueryClient();
@@ -46,7 +49,7 @@ function InviteForm({ cooperativeId }: { cooperativeId: string }) {
         problem={fields.email}
         autoComplete="off"
       />
-      <Segmented label="Role" quietLabel={false} options={roleOptions} value={role} onChange={setRole} />
+      <Segmented<Role> label="Role" quietLabel={false} options={roleOptions} value={role} onChange={setRole} />
       <Button type="submit" busy={invite.isPending} className="justify-self-start">
         Invite
       </Button>
