@@ -65,7 +65,7 @@ export const FLOOR_EMISSIVITY = 0.95;
  * Prepares the heat balance of a cover: layers of known radiative properties with air between them.
  *
  * Shapes: layers from the room outwards, one gap between each two. Units W/m², °C, W/(m² K).
- * Valid: 1 to 12 layers; properties of each face add to at most 1; temperatures −90 to 90 °C.
+ * Valid: 1 to 12 layers; properties of each face add to at most 1; temperatures −150 to 150 °C.
  * Errors: EngineInputError naming the quantity; also when the balance cannot be found within 60 steps.
  * Source [NETWORK]; natural convection [TARP-1983]; air layers [ISO6946].
  */
@@ -114,7 +114,7 @@ function nodesOf(stack: CoverStack): Nodes {
 
 function checkBoundary(boundary: CoverBoundary): void {
   for (const name of ["insideAirC", "insideRadiantC", "outsideAirC", "skyC", "groundC"] as const) {
-    requireInRange(name, boundary[name], -120, 90, "°C");
+    requireInRange(name, boundary[name], -150, 150, "°C");
   }
   requireInRange("skyViewFrac", boundary.skyViewFrac, 0, 1);
   requireInRange("tiltDeg", boundary.tiltDeg, 0, 180, "°");
