@@ -1,12 +1,5 @@
 /** Where the rules of the house balance come from. */
 export const balanceSources = {
-  ISO6946: {
-    author: "ISO",
-    year: 2017,
-    title: "ISO 6946 Building components and building elements: thermal resistance and transmittance",
-    part: "outside film 4 + 4v and 4.16 W/(m² K) of radiation",
-    read: "from memory",
-  },
   ASHRAEAPP: {
     author: "ASHRAE",
     year: 2019,

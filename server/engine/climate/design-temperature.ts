@@ -78,6 +78,7 @@ export function monthPercentileTempC(meanTempC: number, hourlySpreadK: number, p
   return meanTempC + normalQuantile(1 - percentAbove / 100) * hourlySpreadK;
 }
 
+/** Throws EngineInputError unless a list has twelve entries. Shape: name, list → nothing. Source: every monthly method here. */
 export function requireTwelve(quantity: string, values: readonly unknown[]): void {
   if (values.length !== 12)
     throw new EngineInputError({

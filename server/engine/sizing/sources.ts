@@ -1,11 +1,5 @@
 /** Where the rules of heater sizing come from. */
 export const sizingSources = {
-  PICKUP: {
-    author: "trade practice",
-    year: 2026,
-    title: "Pick-up and safety margin of 10 to 25 % on the everyday design need",
-    read: "common practice",
-  },
   COOLINGMASS: {
     author: "trade practice",
     year: 2026,
