@@ -156,6 +156,7 @@ export function lengthText(siValueM: number, system: UnitSystem): string {
 
 /** Heat for a sentence: whole kW or kBtu/h once the number is large enough not to mislead. */
 export function heat(siValueW: number | null | undefined, system: UnitSystem): string {
+  if (siValueW === 0) return text(0, "power", system, { decimals: 0 });
   const shown = fromSi(siValueW ?? Number.NaN, displayUnit("power", system));
   return text(siValueW, "power", system, { decimals: Math.abs(shown) < 10 ? 1 : 0 });
 }

@@ -28,6 +28,8 @@ interface NeedStepsProps {
   installedWords: string;
   proposedWords: string | null;
   height?: number;
+  /** The missing part is hatched; left out for houses that are not meant to be heated. */
+  withShort?: boolean;
   /** Drawn at a fixed width instead of the room there is; paper has no room to measure. */
   width?: number;
 }
@@ -43,7 +45,7 @@ function lowestMonth(needs: number[]): number {
 
 /** Month by month, what the cold night asks for against what is fitted. The missing part is hatched. */
 export function NeedStepsChart(props: NeedStepsProps) {
-  const { data, unit, installedWords, proposedWords, height = 330, width } = props;
+  const { data, unit, installedWords, proposedWords, height = 330, width, withShort = true } = props;
   const { onceInYears, everyday, installed, proposed } = data;
   const edges = [...onceInYears.keys(), onceInYears.length];
   const rows = edges.map((edge) => {
@@ -57,7 +59,7 @@ export function NeedStepsChart(props: NeedStepsProps) {
   });
   const top = niceTop(Math.max(...onceInYears, ...everyday, installed, proposed ?? 0));
   const worst = onceInYears.indexOf(Math.max(...onceInYears));
-  const worstShort = (onceInYears[worst] ?? 0) - installed;
+  const worstShort = withShort ? (onceInYears[worst] ?? 0) - installed : 0;
   const decimals = top < 20 ? 1 : 0;
   // The month that asks for least leaves the most room for words.
   const wordsAt = (lowestMonth(onceInYears) + 0.5) / 12;
@@ -128,17 +130,24 @@ export function NeedStepsChart(props: NeedStepsProps) {
         isAnimationActive={false}
         activeDot={false}
       />
-      <ReferenceLine
-        y={installed}
-        stroke="var(--color-redlead)"
-        strokeWidth={2}
-        strokeDasharray="8 4"
-        label={{
-          content: ({ viewBox }) => (
-            <LineWords viewBox={viewBox} label={installedWords} colour="var(--color-redlead)" at={wordsAt} />
-          ),
-        }}
-      />
+      {installed > 0 ? (
+        <ReferenceLine
+          y={installed}
+          stroke="var(--color-redlead)"
+          strokeWidth={2}
+          strokeDasharray="8 4"
+          label={{
+            content: ({ viewBox }) => (
+              <LineWords
+                viewBox={viewBox}
+                label={installedWords}
+                colour="var(--color-redlead)"
+                at={wordsAt}
+              />
+            ),
+          }}
+        />
+      ) : null}
       {proposed !== null && proposedWords ? (
         <ReferenceLine
           y={proposed}

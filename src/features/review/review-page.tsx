@@ -3,6 +3,7 @@ import { ArrowLeft, Mail, Printer } from "lucide-react";
 import { useCallback, useState } from "react";
 import { Link } from "react-router-dom";
 import type { PlanView } from "../../../server/contracts/plans.ts";
+import { FootBar } from "../../components/foot-bar.tsx";
 import { Cautions } from "../../components/plan/cautions.tsx";
 import { HatchSheet } from "../../components/section-drawing/hatches.tsx";
 import { SectionNight } from "../../components/section-drawing/section-night.tsx";
@@ -100,12 +101,12 @@ export function ReviewPage({ plan }: { plan: PlanView }) {
           </article>
           <aside aria-label="Answer" className="border-ink bg-sheet px-7 py-6 max-lg:px-4 lg:border-l-2">
             {plan.can.answer || plan.answeredAt ? (
-              <div className="max-lg:fixed max-lg:inset-x-0 max-lg:bottom-0 max-lg:z-10 max-lg:max-h-[80dvh] max-lg:overflow-y-auto max-lg:border-t-2 max-lg:border-ink max-lg:bg-sheet max-lg:p-4">
-                <h2 className="m-0 mb-2 font-sign text-lg font-bold max-lg:sr-only">
+              <FootBar>
+                <h2 className="m-0 mb-2 font-sign text-lg font-bold max-md:sr-only">
                   {plan.can.answer ? "Your answer" : "The farmer's answer"}
                 </h2>
                 <AnswerBox plan={plan} question={question} onQuestionTaken={questionTaken} />
-              </div>
+              </FootBar>
             ) : (
               <p className="m-0">{`${statusWords[plan.status]}. Only the farmer can answer.`}</p>
             )}

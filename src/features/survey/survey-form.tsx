@@ -6,6 +6,7 @@ import type { BuildingView } from "../../../server/contracts/buildings.ts";
 import type { LibraryView } from "../../../server/contracts/library.ts";
 import type { Origin } from "../../../server/contracts/quantity.ts";
 import type { Survey, SurveyView } from "../../../server/contracts/survey.ts";
+import { Button } from "../../components/button.tsx";
 import { BuildingHead } from "../../components/plan/building-head.tsx";
 import { HatchSheet } from "../../components/section-drawing/hatches.tsx";
 import { useUnits } from "../../lib/units.ts";
@@ -95,14 +96,9 @@ export function SurveyForm({ building, view, library }: SurveyFormProps) {
     [form.control, library, units.system, disabled, typedOrigin, active, sync.refused, sync.forget],
   );
   const action = building.can.plan ? (
-    <button
-      type="button"
-      disabled={workOut.isPending}
-      onClick={() => void compute()}
-      className="min-h-10 min-w-44 rounded-control bg-bottle px-4 font-bold text-on-bottle hover:bg-bottle-deep disabled:bg-trough disabled:text-ink-2 pointer-coarse:min-h-12"
-    >
-      {workOut.isPending ? "Working…" : "Work out the heat"}
-    </button>
+    <Button busy={workOut.isPending} onClick={() => void compute()} className="min-w-44">
+      Work out the heat
+    </Button>
   ) : null;
 
   return (

@@ -18,10 +18,14 @@ function facts(plan: PlanView, units: Units): Fact[] {
       name: "Ordinary cold night",
       value: `${verdictWords[sizing.verdictEveryday]}, ${units.heat(sizing.everydayRequiredW)} needed`,
     },
-    {
-      name: "Largest fitted heater out, house settles at",
-      value: units.temperature(sizing.largestUnitOutSettlesAtC),
-    },
+    ...(sizing.installedW > 0
+      ? [
+          {
+            name: "Largest fitted heater out, house settles at",
+            value: units.temperature(sizing.largestUnitOutSettlesAtC),
+          },
+        ]
+      : []),
     {
       name: "All heat stops, time to the critical temperature",
       value: low === null || high === null ? "not reached or not known" : spanRange(low, high),
@@ -32,7 +36,9 @@ function facts(plan: PlanView, units: Units): Fact[] {
     },
     { name: "Fuel in a normal year", value: `${number(annual.fuelAmount)}\u00a0${annual.fuelUnit}` },
     { name: "Carbon dioxide from it", value: units.text(annual.carbonDioxideKg, "mass", { decimals: 0 }) },
-    { name: "Buy for, with margin", value: units.heat(sizing.targetW) },
+    ...(sizing.noHeaterReason === null
+      ? [{ name: "Buy for, with margin", value: units.heat(sizing.targetW) }]
+      : []),
   ];
 }
 
@@ -42,7 +48,7 @@ export function SizingFacts({ plan, units }: { plan: PlanView; units: Units }) {
   return (
     <section aria-labelledby="facts-heading">
       <h2 id="facts-heading" className="m-0 font-sign text-lg font-bold">
-        With what is fitted now
+        {plan.result.sizing.installedW > 0 ? "With what is fitted now" : "As it is, without a heater"}
       </h2>
       {failure ? <p className="m-0 mt-1 text-sm">{failure}</p> : null}
       <dl className="m-0 mt-1 text-sm">

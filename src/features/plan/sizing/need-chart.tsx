@@ -52,13 +52,19 @@ export function NeedChart({ result, chosen, units, fileName }: NeedChartProps) {
     undefined,
   );
   const worstShortW = (worst?.onceInYearsRequiredW ?? 0) - installedW;
-  const shortWords =
-    shortMonths.length > 0 && worst
+  const unheated = result.sizing.noHeaterReason !== null;
+  const shortWords = unheated
+    ? "kept without heat"
+    : shortMonths.length > 0 && worst
       ? `short in ${counted(shortMonths.length, "month")}, worst ${units.heat(worstShortW)} in ${monthAbbreviation(worst.month)}`
       : "enough in every month";
   return (
     <ChartFrame
-      title="Heat needed on the coldest night of each month"
+      title={
+        unheated
+          ? "What keeping the wanted temperature would take"
+          : "Heat needed on the coldest night of each month"
+      }
       aside={
         <span className="inline-flex flex-wrap items-center gap-x-4 gap-y-1">
           <span className="inline-flex items-center gap-2">
@@ -74,7 +80,7 @@ export function NeedChart({ result, chosen, units, fileName }: NeedChartProps) {
             ordinary cold night
           </span>
           <span className="inline-flex items-center gap-2">
-            {shortMonths.length > 0 ? (
+            {shortMonths.length > 0 && !unheated ? (
               <svg width="26" height="14" aria-hidden="true">
                 <rect width="26" height="14" fill={hatch("short")} stroke="var(--color-redlead)" />
               </svg>
@@ -84,7 +90,11 @@ export function NeedChart({ result, chosen, units, fileName }: NeedChartProps) {
         </span>
       }
       unit={units.symbol("power")}
-      sentence={`${units.heat(installedW)} is fitted: ${shortWords}.`}
+      sentence={
+        installedW > 0
+          ? `${units.heat(installedW)} is fitted: ${shortWords}.`
+          : `No heater is fitted: ${shortWords}.`
+      }
       columns={columns(result, units)}
       rows={result.months}
       rowKey={(row) => String(row.month)}
@@ -92,6 +102,7 @@ export function NeedChart({ result, chosen, units, fileName }: NeedChartProps) {
     >
       <NeedStepsChart
         unit={units.symbol("power")}
+        withShort={!unheated}
         installedWords={`Fitted now: ${units.heat(installedW)}`}
         proposedWords={chosen ? `Chosen: ${units.heat(chosen.totalW)}` : null}
         data={{

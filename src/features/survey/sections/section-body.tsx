@@ -1,4 +1,6 @@
 import type { ComponentType } from "react";
+import { Button } from "../../../components/button.tsx";
+import { FootBar } from "../../../components/foot-bar.tsx";
 import { AirSection } from "./air-section.tsx";
 import { CoverSection } from "./cover-section.tsx";
 import { FloorSection } from "./floor-section.tsx";
@@ -37,27 +39,25 @@ export function SectionBody({ current, onGo }: SectionBodyProps) {
         </h2>
         <Body />
       </div>
-      <div className="flex gap-3 bg-sheet p-4 max-md:fixed max-md:inset-x-0 max-md:bottom-0 max-md:z-10 max-md:border-t-2 max-md:border-ink md:justify-between md:px-6">
-        <button
-          type="button"
-          disabled={!before}
-          onClick={() => before && onGo(before.id)}
-          className="min-h-11 rounded-control border-2 border-rule-strong bg-sheet px-4 font-bold hover:bg-trough disabled:border-rule disabled:text-ink-2 disabled:hover:bg-sheet max-md:min-h-15 max-md:basis-1/3"
-        >
-          Back
-        </button>
-        {next ? (
-          <button
-            type="button"
-            onClick={() => onGo(next.id)}
-            className="min-h-11 rounded-control bg-bottle px-4 font-bold text-on-bottle hover:bg-bottle-deep max-md:min-h-15 max-md:flex-1"
+      <FootBar className="md:p-6">
+        <div className="flex gap-3 md:justify-between">
+          <Button
+            kind="plain"
+            disabled={!before}
+            onClick={() => before && onGo(before.id)}
+            className="max-md:min-h-15 max-md:basis-1/3"
           >
-            {`Next: ${next.title}`}
-          </button>
-        ) : (
-          <p className="m-0 self-center text-sm text-ink-2">That was the last group.</p>
-        )}
-      </div>
+            Back
+          </Button>
+          {next ? (
+            <Button onClick={() => onGo(next.id)} className="max-md:min-h-15 max-md:flex-1">
+              {`Next: ${next.title}`}
+            </Button>
+          ) : (
+            <p className="m-0 self-center text-sm text-ink-2">That was the last group.</p>
+          )}
+        </div>
+      </FootBar>
     </>
   );
 }
