@@ -1,0 +1,52 @@
+import "./map.css";
+import type { LatLngBoundsExpression, LatLngExpression } from "leaflet";
+import type { ReactNode } from "react";
+import { MapContainer } from "react-leaflet";
+import { MapFrame } from "./map-frame.tsx";
+import { MapScale } from "./map-scale.tsx";
+import { PlaceNames } from "./place-names.tsx";
+import { WorldLayer } from "./world-layer.tsx";
+
+const WORLD: LatLngBoundsExpression = [
+  [-85, -180],
+  [85, 180],
+];
+
+export const DEEPEST_ZOOM = 19;
+
+interface SheetMapProps {
+  label: string;
+  center: LatLngExpression;
+  zoom: number;
+  framed?: boolean;
+  scaleClass?: string;
+  children?: ReactNode;
+}
+
+/** A sheet of map without a tile server: outlines, grid, names and scale, all from the product's own files. */
+export function SheetMap({ label, center, zoom, framed = true, scaleClass, children }: SheetMapProps) {
+  return (
+    <section aria-label={label} className="relative isolate h-full min-h-0 w-full">
+      <MapContainer
+        className="sheet-map h-full w-full"
+        center={center}
+        zoom={zoom}
+        minZoom={2}
+        maxZoom={DEEPEST_ZOOM}
+        maxBounds={WORLD}
+        maxBoundsViscosity={1}
+        zoomControl={false}
+        attributionControl={false}
+        zoomAnimation={false}
+        markerZoomAnimation={false}
+        fadeAnimation={false}
+      >
+        <WorldLayer />
+        <MapFrame framed={framed} />
+        <PlaceNames />
+        <MapScale className={scaleClass ?? (framed ? "bottom-5 left-11" : "bottom-2 left-2")} />
+        {children}
+      </MapContainer>
+    </section>
+  );
+}

@@ -1,0 +1,53 @@
+import { queryOptions } from "@tanstack/react-query";
+import type { FeatureCollection, MultiLineString, Position } from "geojson";
+import { feature, mesh } from "topojson-client";
+import type { GeometryCollection, Topology } from "topojson-specification";
+import atlasUrl from "world-atlas/countries-50m.json?url";
+
+type Atlas = Topology<{ countries: GeometryCollection; land: GeometryCollection }>;
+
+export interface WorldOutline {
+  land: FeatureCollection;
+  coast: MultiLineString;
+  borders: MultiLineString;
+}
+
+/** The atlas closes its polygons along the date line and the pole; nobody has seen a shore there. */
+const isSeam = ([longitude = 0, latitude = 0]: Position) => Math.abs(longitude) > 179.99 || latitude < -89.9;
+
+function withoutSeams(lines: MultiLineString): MultiLineString {
+  const kept: Position[][] = [];
+  for (const line of lines.coordinates) {
+    let run: Position[] = [];
+    line.forEach((point, index) => {
+      const before = line[index - 1];
+      if (before !== undefined && isSeam(before) && isSeam(point)) {
+        if (run.length > 1) kept.push(run);
+        run = [];
+      }
+      run.push(point);
+    });
+    if (run.length > 1) kept.push(run);
+  }
+  return { type: "MultiLineString", coordinates: kept };
+}
+
+async function loadOutline({ signal }: { signal: AbortSignal }): Promise<WorldOutline> {
+  const response = await fetch(atlasUrl, { signal });
+  if (!response.ok) throw new Error(`the outlines of the map answered ${response.status}`);
+  const atlas = (await response.json()) as Atlas;
+  const { countries, land } = atlas.objects;
+  return {
+    land: feature(atlas, land),
+    coast: withoutSeams(mesh(atlas, countries, (a, b) => a === b)),
+    borders: mesh(atlas, countries, (a, b) => a !== b),
+  };
+}
+
+/** Outlines of land and countries, made of Natural Earth's 1:50 million sheets and bundled with the pages. */
+export const worldOutlineQuery = queryOptions({
+  queryKey: ["world-outline"],
+  queryFn: loadOutline,
+  staleTime: Number.POSITIVE_INFINITY,
+  gcTime: Number.POSITIVE_INFINITY,
+});
