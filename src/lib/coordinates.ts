@@ -1,8 +1,9 @@
-const compass: Record<string, number> = { N: 1, S: -1, E: 1, O: 1, W: -1 };
+/** O is left out: it is east in German and west in French and Spanish, and a guess would move the house by a continent. */
+const compass: Record<string, number> = { N: 1, S: -1, E: 1, W: -1 };
 
 /** A typed degree as a number: decimal degrees, a leading minus or a letter for the half of the world. Null when it is no number. */
 export function parseDegrees(text: string): number | null {
-  const match = /^\s*([NSEWO])?\s*([-−+]?\d{1,3}(?:[.,]\d+)?)\s*°?\s*([NSEWO])?\s*$/i.exec(text);
+  const match = /^\s*([NSEW])?\s*([-−+]?\d{1,3}(?:[.,]\d+)?)\s*°?\s*([NSEW])?\s*$/i.exec(text);
   if (match === null) return null;
   const value = Number((match[2] ?? "").replace(",", ".").replace("−", "-"));
   const letter = (match[1] ?? match[3] ?? "").toUpperCase();

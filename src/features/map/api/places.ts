@@ -40,15 +40,3 @@ export function placesInViewQuery(box: ViewBox) {
     gcTime: 60_000,
   });
 }
-
-export const SHORTEST_SEARCH = 2;
-
-export function placeSearchQuery(text: string) {
-  return queryOptions({
-    queryKey: ["places", "search", text],
-    queryFn: ({ signal }) => places("/api/places/search", { text }, signal),
-    enabled: text.length >= SHORTEST_SEARCH,
-    staleTime: Number.POSITIVE_INFINITY,
-    gcTime: 60_000,
-  });
-}

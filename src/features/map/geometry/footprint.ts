@@ -14,6 +14,11 @@ export interface Footprint {
   bearingDeg: number;
 }
 
+/** The pair Leaflet asks for. */
+export function latLng({ latitudeDeg, longitudeDeg }: GroundPoint): [latitude: number, longitude: number] {
+  return [latitudeDeg, longitudeDeg];
+}
+
 const radians = (deg: number) => (deg * Math.PI) / 180;
 
 /** A longitude between -180° and 180°. */
