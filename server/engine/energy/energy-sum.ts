@@ -36,19 +36,18 @@ export class EnergySum {
     const insideC = result.insideTempC;
     const lossW = hour.lossAtReferenceW + hour.lossPerInsideWK * (insideC - hour.referenceC);
     // Heat that comes in through a warm shell and leaves with the air again is neither loss nor gain.
-    const passing = lossW < 0;
-    if (!passing) {
-      const airW = hour.airWK * (insideC - hour.outdoorTempC);
-      const groundW = hour.groundWK * (insideC - hour.outdoorTempC);
-      this.losses.air += airW * days;
-      this.losses.ground += groundW * days;
-      this.losses.sky += hour.skyW * days;
-      this.losses.cover += (lossW - airW - groundW - hour.skyW) * days;
-    }
+    const passingW = lossW < 0 ? Math.min(result.ventedW, -lossW) : 0;
+    const counted = lossW < 0 ? days * (1 + passingW / lossW) : days;
+    const airW = hour.airWK * (insideC - hour.outdoorTempC);
+    const groundW = hour.groundWK * (insideC - hour.outdoorTempC);
+    this.losses.air += airW * counted;
+    this.losses.ground += groundW * counted;
+    this.losses.sky += hour.skyW * counted;
+    this.losses.cover += (lossW - airW - groundW - hour.skyW) * counted;
     this.gains.sun += hour.gainsW.sun * days;
     this.gains.stock += hour.gainsW.stock * days;
     this.gains.lights += hour.gainsW.lights * days;
-    this.vented += Math.max(0, result.ventedW + (passing ? lossW : 0)) * days;
+    this.vented += (result.ventedW - passingW) * days;
     this.heater += result.heaterW * days;
     this.unmet += (result.neededW - result.heaterW) * days;
     this.heaterByHour[index] = (this.heaterByHour[index] ?? 0) + result.heaterW * days;

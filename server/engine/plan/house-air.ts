@@ -78,7 +78,9 @@ export function houseAir(model: HouseModel, use: MonthUse): HouseAir {
         pressurePa,
         carbonDioxideLimitPpm: stock.carbonDioxideLimitPpm,
         headCount: use.headCount,
-        perHeadM3H: ventilation.perHeadM3H,
+        perHeadM3H: ventilation.perKg075M3H
+          ? ventilation.perKg075M3H * massKg ** 0.75
+          : ventilation.perHeadM3H,
       });
       return withFans(minimum.flowM3H, minimum.governs);
     },

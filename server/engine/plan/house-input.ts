@@ -41,7 +41,14 @@ export interface StockInput {
   classId: string;
   name: string;
   /** Winter ventilation: worked out from water, carbon dioxide and the per-head rate, or as measured. */
-  ventilation: { mode: "balance"; perHeadM3H: number } | { mode: "typed"; flowM3H: number };
+  ventilation:
+    | {
+        mode: "balance";
+        perHeadM3H: number;
+        /** Where the rate goes with the mass: m³/h for each kg to the power 0.75; it then takes the place of the rate per head. */
+        perKg075M3H?: number | null;
+      }
+    | { mode: "typed"; flowM3H: number };
   humidityLimitFrac: number;
   carbonDioxideLimitPpm: number;
   heatRecoveryFrac: number;
