@@ -1,5 +1,5 @@
 import "./map.css";
-import type { LatLngBoundsExpression, LatLngExpression } from "leaflet";
+import type { LatLngBoundsExpression, LatLngExpression, Map as LeafletMap } from "leaflet";
 import type { ReactNode } from "react";
 import { MapContainer } from "react-leaflet";
 import { MapFrame } from "./map-frame.tsx";
@@ -20,14 +20,17 @@ interface SheetMapProps {
   zoom: number;
   framed?: boolean;
   scaleClass?: string;
+  /** Hands out the map for moves asked for outside of it. */
+  onMap?: (map: LeafletMap | null) => void;
   children?: ReactNode;
 }
 
 /** A sheet of map without a tile server: outlines, grid, names and scale, all from the product's own files. */
-export function SheetMap({ label, center, zoom, framed = true, scaleClass, children }: SheetMapProps) {
+export function SheetMap({ label, center, zoom, framed = true, scaleClass, onMap, children }: SheetMapProps) {
   return (
     <section aria-label={label} className="relative isolate h-full min-h-0 w-full">
       <MapContainer
+        ref={onMap}
         className="sheet-map h-full w-full"
         center={center}
         zoom={zoom}

@@ -32,11 +32,7 @@ export function Footprints({ buildings, chosenId }: FootprintsProps) {
             interactive={false}
             positions={plan.map(latLng)}
           />
-          <Polyline
-            className="map-ridge"
-            interactive={false}
-            positions={ridge.map(latLng)}
-          />
+          <Polyline className="map-ridge" interactive={false} positions={ridge.map(latLng)} />
         </Fragment>
       );
     });

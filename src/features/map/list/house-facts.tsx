@@ -32,6 +32,7 @@ export function houseFacts(building: BuildingSummary, units: Units): Fact[] {
     { name: "Settles at", value: units.temperature(plan.settlesAtC) },
   ];
   const { hoursToCriticalLow: low, hoursToCriticalHigh: high } = plan;
-  if (low !== null && high !== null) facts.push({ name: "Until critical, no heat", value: spanRange(low, high) });
+  if (low !== null && high !== null)
+    facts.push({ name: "Until critical, no heat", value: spanRange(low, high) });
   return facts;
 }

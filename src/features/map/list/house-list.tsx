@@ -61,7 +61,9 @@ export function HouseList(props: HouseListProps) {
   const list = useRef<HTMLUListElement>(null);
   useEffect(() => {
     if (chosenId === null) return;
-    list.current?.querySelector(`[data-house="${CSS.escape(chosenId)}"]`)?.scrollIntoView?.({ block: "nearest" });
+    list.current
+      ?.querySelector(`[data-house="${CSS.escape(chosenId)}"]`)
+      ?.scrollIntoView?.({ block: "nearest" });
   }, [chosenId]);
   return (
     <div className="flex min-h-0 flex-1 flex-col">
