@@ -54,10 +54,10 @@ export function CapacityBar({ parts, needShare, sentence, shortWords, height = 3
       />
       {shortWords ? (
         <span
-          className="absolute inset-y-0 my-auto h-fit bg-sheet px-1.5 text-sm font-bold whitespace-nowrap text-redlead"
+          className="absolute inset-y-0 my-auto h-fit bg-sheet px-1 text-sm leading-tight font-bold text-redlead md:whitespace-nowrap"
           style={
             needShare < 0.72
-              ? { left: `calc(${at(needShare)} + 8px)` }
+              ? { left: `calc(${at(needShare)} + 6px)`, maxWidth: `calc(${at(1 - needShare)} - 6px)` }
               : { right: `calc(100% - ${at(needShare)} + 8px)` }
           }
         >

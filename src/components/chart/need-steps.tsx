@@ -61,6 +61,8 @@ export function NeedStepsChart(props: NeedStepsProps) {
   const worst = onceInYears.indexOf(Math.max(...onceInYears));
   const worstShort = withShort ? (onceInYears[worst] ?? 0) - installed : 0;
   const decimals = top < 20 ? 1 : 0;
+  // Three digits a month do not fit a phone; every second one does, the worst among them.
+  const crowded = top >= 100;
   // The month that asks for least leaves the most room for words.
   const wordsAt = (lowestMonth(onceInYears) + 0.5) / 12;
   const chart = (
@@ -166,7 +168,12 @@ export function NeedStepsChart(props: NeedStepsProps) {
           x={month + 0.5}
           y={need}
           r={0}
-          label={{ value: need > 0 ? number(need, decimals) : "\u2013", position: "top", ...words }}
+          label={{
+            value: need > 0 ? number(need, decimals) : "\u2013",
+            position: "top",
+            className: crowded && (month - worst) % 2 !== 0 ? "max-sm:hidden" : undefined,
+            ...words,
+          }}
         />
       ))}
       {worstShort > 0 && installed > 0 ? (

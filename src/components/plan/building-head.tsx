@@ -14,6 +14,8 @@ interface BuildingHeadProps {
   status?: ReactNode;
   /** The one main action, top right. */
   action?: ReactNode;
+  /** On a phone the action stands at the foot of the screen instead. */
+  actionAtFoot?: boolean;
 }
 
 const tabs = [
@@ -23,7 +25,7 @@ const tabs = [
 ];
 
 /** The building's title block and the tabs of its pages. */
-export function BuildingHead({ building, units, status, action }: BuildingHeadProps) {
+export function BuildingHead({ building, units, status, action, actionAtFoot = false }: BuildingHeadProps) {
   const width = units.figure(building.widthM, "length", { decimals: 1 });
   const size = `${width.value} × ${joined(units.figure(building.lengthM, "length", { decimals: 1 }))}`;
   const cells = [
@@ -66,6 +68,9 @@ export function BuildingHead({ building, units, status, action }: BuildingHeadPr
             </p>
           </div>
         </div>
+        {status ? (
+          <div className="max-w-[46%] self-center pr-4 text-sm text-ink-2 md:hidden">{status}</div>
+        ) : null}
         <dl className="m-0 flex max-lg:hidden">
           {cells.map((cell) => (
             <div key={cell.name} className="flex flex-col justify-center border-l border-rule px-5">
@@ -89,8 +94,10 @@ export function BuildingHead({ building, units, status, action }: BuildingHeadPr
             </NavLink>
           ))}
         </nav>
-        <div className="ml-auto flex flex-wrap items-center gap-3 px-4 py-0.5 max-md:w-full max-md:py-2">
-          {status ? <div className="text-sm text-ink-2">{status}</div> : null}
+        <div
+          className={`ml-auto flex flex-wrap items-center gap-3 px-4 py-0.5 ${actionAtFoot || !action ? "max-md:hidden" : "max-md:w-full max-md:py-2"}`}
+        >
+          {status ? <div className="text-sm text-ink-2 max-md:hidden">{status}</div> : null}
           {action}
         </div>
       </div>

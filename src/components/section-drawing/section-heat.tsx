@@ -23,8 +23,11 @@ export interface SectionHeatProps {
   greatestFlowW: number;
   system: UnitSystem;
   layout: "wide" | "phone";
-  /** How a flow is written; the table beside the drawing uses the same function. */
+  /** How a flow is written, with and without its unit; the table beside the drawing shows the same digits. */
   written: (heatW: number) => string;
+  bare: (heatW: number) => string;
+  /** Unit of the bare numbers, written once in the small drawing. */
+  unit: string;
   /** Words for the sky's state, upper left. */
   weather: string;
 }
@@ -39,7 +42,8 @@ export function SectionHeat(props: SectionHeatProps) {
   const sky = plan.arrows.find((arrow) => arrow.path === "sky");
   const lamp = plan.arrows.find((arrow) => arrow.path === "lights");
   const phone = props.layout === "phone";
-  const labels = { plan, frame, layout, flows, written };
+  const drawn = phone ? props.bare : written;
+  const labels = { plan, frame, layout, flows, written: drawn };
   return (
     <svg
       viewBox={`0 0 ${layout.width} ${layout.height}`}
@@ -59,7 +63,7 @@ export function SectionHeat(props: SectionHeatProps) {
       {sky ? (
         <HeatLabel
           path="sky"
-          heat={written(flows.sky)}
+          heat={drawn(flows.sky)}
           x={sky.from.x - sky.width / 2 - 14}
           y={Math.max(phone ? 18 : 28, sky.to.y + 4)}
           fontSize={layout.fontSize}
@@ -97,7 +101,7 @@ export function SectionHeat(props: SectionHeatProps) {
         phone={phone}
       />
       <text x={phone ? 10 : 18} y={phone ? 18 : 28} fontSize={phone ? 12.5 : 14} fill="var(--color-ink-2)">
-        {phone ? "" : props.weather}
+        {phone ? `Heat in ${props.unit}` : props.weather}
       </text>
       <ScaleBar frame={frame} system={system} x={phone ? 10 : 18} y={layout.height - 14} />
       {shape.drawnSpans < shape.spans ? (

@@ -41,7 +41,9 @@ interface LineProps {
 function DimensionLine({ x1, y1, x2, y2, label, active, width }: LineProps) {
   const colour = active ? "var(--color-redlead)" : "var(--color-ink-2)";
   const plate = label.length * (active ? 8.4 : 7.5) + 12;
-  const midX = Math.min(width - plate / 2 - 3, Math.max(plate / 2 + 3, (x1 + x2) / 2));
+  const beside = x1 !== x2 && Math.abs(x2 - x1) < plate + 8;
+  const wantedX = beside ? Math.max(x1, x2) + plate / 2 + 10 : (x1 + x2) / 2;
+  const midX = Math.min(width - plate / 2 - 3, Math.max(plate / 2 + 3, wantedX));
   const midY = (y1 + y2) / 2;
   const tick = (x: number, y: number) => `M${px(x - 6)} ${px(y + 6)}L${px(x + 6)} ${px(y - 6)}`;
   return (

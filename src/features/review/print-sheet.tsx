@@ -71,6 +71,8 @@ export function PrintSheet({ plan, library, units }: PrintSheetProps) {
             system={units.system}
             layout="wide"
             written={(heatW) => joined(power(heatW))}
+            bare={(heatW) => power(heatW).value}
+            unit={units.symbol("power")}
             weather=""
           />
           <figcaption className="border-t border-ink px-2 py-1">

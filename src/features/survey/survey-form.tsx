@@ -110,6 +110,7 @@ export function SurveyForm({ building, view, library }: SurveyFormProps) {
           units={units}
           status={<SyncStatus state={sync.state} />}
           action={action}
+          actionAtFoot
         />
         {sync.state.kind === "stale" ? (
           <StaleChoice theirs={sync.state.theirs} onMine={sync.keepMine} onTheirs={sync.takeTheirs} />
@@ -138,7 +139,7 @@ export function SurveyForm({ building, view, library }: SurveyFormProps) {
                 />
               ) : null}
             </div>
-            <SectionBody current={current} onGo={go} />
+            <SectionBody current={current} onGo={go} lastAction={action} />
           </div>
           <aside
             aria-label="The house as drawn from these answers"

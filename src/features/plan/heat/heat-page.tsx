@@ -6,7 +6,7 @@ import { rarity, stateWords, verdictWords } from "../../../components/plan/state
 import { WarningList } from "../../../components/plan/warning-list.tsx";
 import { flowsOf } from "../../../components/section-drawing/heat-paths.ts";
 import { spokenFlows } from "../../../components/section-drawing/spoken-flows.ts";
-import { dayAndClock, monthName } from "../../../lib/format.ts";
+import { day, monthName } from "../../../lib/format.ts";
 import type { LoadedPlan } from "../latest-plan.tsx";
 import { BalancePicker } from "./balance-picker.tsx";
 import { BalanceTable } from "./balance-table.tsx";
@@ -50,7 +50,7 @@ export function HeatPage({ building, plan, library, units }: LoadedPlan) {
       <BuildingHead
         building={building}
         units={units}
-        status={`Plan ${plan.number}, worked out ${dayAndClock(plan.createdAt)}`}
+        status={`Plan ${plan.number} of ${day(plan.createdAt)}`}
       />
       {plan.outdated ? (
         <p role="status" className="m-0 border-b-2 border-straw bg-straw-tint px-4 py-2 text-sm">

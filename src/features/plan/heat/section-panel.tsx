@@ -67,6 +67,8 @@ export function SectionPanel({ plan, balance, occupied, covers, units }: Section
     greatestFlowW,
     system: units.system,
     written: flowWriter(flows, units).full,
+    bare: flowWriter(flows, units).plain,
+    unit: units.symbol("power"),
     weather: `Night, no sun. Wind ${units.text(balance.windMS, "speed")}`,
   };
   return (

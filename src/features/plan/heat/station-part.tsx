@@ -15,8 +15,15 @@ export function StationPart({ result, units }: { result: PlanResult; units: Unit
         Weather from {station.name}
       </h2>
       <p className="m-0 mt-1 text-sm">
-        {units.text(station.distanceKm * 1000, "distance")} away, {height}. Design temperatures are moved by{" "}
-        <b>{units.text(station.siteCorrectionK, "temperatureDifference")}</b> to fit the site.
+        {units.text(station.distanceKm * 1000, "distance")} away, {height}.{" "}
+        {Math.abs(station.siteCorrectionK) < 0.05 ? (
+          "Its design temperatures are used as they are."
+        ) : (
+          <>
+            Design temperatures are moved by{" "}
+            <b>{units.text(station.siteCorrectionK, "temperatureDifference")}</b> to fit the site.
+          </>
+        )}
       </p>
       {station.reasons.length > 0 ? (
         <ul className="m-0 mt-1 list-none p-0 text-sm text-ink-2">

@@ -1,4 +1,4 @@
-import type { ComponentType } from "react";
+import type { ComponentType, ReactNode } from "react";
 import { Button } from "../../../components/button.tsx";
 import { FootBar } from "../../../components/foot-bar.tsx";
 import { AirSection } from "./air-section.tsx";
@@ -23,10 +23,12 @@ const bodies: Record<SectionId, ComponentType> = {
 interface SectionBodyProps {
   current: SectionId;
   onGo: (id: SectionId) => void;
+  /** What comes after the last group. */
+  lastAction: ReactNode;
 }
 
 /** One group of questions, with the way to the next. */
-export function SectionBody({ current, onGo }: SectionBodyProps) {
+export function SectionBody({ current, onGo, lastAction }: SectionBodyProps) {
   const Body = bodies[current];
   const index = surveySections.findIndex((section) => section.id === current);
   const before = surveySections[index - 1];
@@ -54,7 +56,9 @@ export function SectionBody({ current, onGo }: SectionBodyProps) {
               {`Next: ${next.title}`}
             </Button>
           ) : (
-            <p className="m-0 self-center text-sm text-ink-2">That was the last group.</p>
+            <div className="flex max-md:flex-1 max-md:[&>button]:min-h-15 max-md:[&>button]:w-full">
+              {lastAction}
+            </div>
           )}
         </div>
       </FootBar>
