@@ -1,4 +1,5 @@
 import { createBrowserRouter, type RouteObject } from "react-router-dom";
+import { PageState } from "../components/page-state.tsx";
 import { RouteError } from "./route-error.tsx";
 import { Shell } from "./shell.tsx";
 import { Start } from "./start.tsx";
@@ -22,13 +23,26 @@ const screens: RouteObject[] = [
 ];
 
 export function createRouter() {
+  // Until the first screen's file is here; the shell says the same while it waits for the person.
+  const hydrateFallbackElement = <PageState kind="loading" />;
   return createBrowserRouter([
-    { path: "/sign-in", errorElement: <RouteError />, lazy: () => import("./routes/sign-in.tsx") },
-    { path: "/no-access", errorElement: <RouteError />, lazy: () => import("./routes/no-access.tsx") },
+    {
+      path: "/sign-in",
+      errorElement: <RouteError />,
+      hydrateFallbackElement,
+      lazy: () => import("./routes/sign-in.tsx"),
+    },
+    {
+      path: "/no-access",
+      errorElement: <RouteError />,
+      hydrateFallbackElement,
+      lazy: () => import("./routes/no-access.tsx"),
+    },
     {
       path: "/",
       element: <Shell />,
       errorElement: <RouteError />,
+      hydrateFallbackElement,
       // A screen that fails keeps the head of the sheet around it.
       children: screens.map((screen) => ({ ...screen, errorElement: <RouteError /> })),
     },
