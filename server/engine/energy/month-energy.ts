@@ -61,10 +61,7 @@ export function monthEnergy(input: MonthEnergyInput): MonthEnergy {
     OutsideHour,
     OutsideHour,
   ];
-  const responses: Responses = {
-    night: shellResponse(input.shell, input.nightSetpointC, probes, input.screenByNight ? "shut" : "open"),
-    day: shellResponse(input.shell, input.daySetpointC, probes, "open"),
-  };
+  const responses = monthResponses(input, probes);
   const mass = {
     capacityJK: FLOOR_HEAT_JM2K * input.floorAreaM2,
     couplingWK: FLOOR_COUPLING_WM2K * input.floorAreaM2,
@@ -83,6 +80,25 @@ export function monthEnergy(input: MonthEnergyInput): MonthEnergy {
       sum.addDay(hours, results, day.weight * weight * input.days);
     }
   return sum.result(input.days);
+}
+
+/** Set-points this near to each other share one response, K: its loss is straight in the inside temperature that far. */
+const SHARED_WITHIN_K = 5;
+
+/** Without a screen and with like set-points, night and day differ by nothing the response does not hold itself. */
+function monthResponses(
+  input: MonthEnergyInput,
+  probes: readonly [OutsideHour, OutsideHour, OutsideHour],
+): Responses {
+  const { nightSetpointC, daySetpointC, shell } = input;
+  if (!input.screenByNight && Math.abs(nightSetpointC - daySetpointC) <= SHARED_WITHIN_K) {
+    const both = shellResponse(shell, (nightSetpointC + daySetpointC) / 2, probes, "open", true);
+    return { night: both, day: both };
+  }
+  return {
+    night: shellResponse(shell, nightSetpointC, probes, input.screenByNight ? "shut" : "open", false),
+    day: shellResponse(shell, daySetpointC, probes, "open", true),
+  };
 }
 
 export interface Responses {

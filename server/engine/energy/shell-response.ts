@@ -26,13 +26,14 @@ const PROBE_SUN_WM2 = 200;
 
 /**
  * Prepares the response of a shell for a month.
- * Shape: shell, inside °C, three outside hours in rising temperature, screen → response. Source [LAGRANGE].
+ * Shape: shell, inside °C, three outside hours in rising temperature, screen, whether the sun matters → response. Source [LAGRANGE].
  */
 export function shellResponse(
   shell: HouseShell,
   referenceInsideC: number,
   hours: readonly [OutsideHour, OutsideHour, OutsideHour],
   screen: ScreenPosition,
+  withSun = true,
 ): ShellResponse {
   const bare = { ...shell, floorEdgeLossWMK: 0 };
   const at = (outside: OutsideHour): ShellHour => ({ outside, screen, air: STILL_AIR, groupSunWM2: [] });
@@ -54,11 +55,13 @@ export function shellResponse(
     lossW: curve((result) => result.totalW),
     skyW: curve((result) => result.lossesW.sky),
     lossPerInsideWK: warmer.totalW - results[1].totalW,
-    lossPerSunM2: shell.groups.map((group, index) => {
-      const dark = results[1].fluxes[index]?.lossWM2 ?? 0;
-      const lit = group.flux(referenceInsideC, hours[1], screen, PROBE_SUN_WM2).lossWM2;
-      return ((lit - dark) / PROBE_SUN_WM2) * group.areaM2;
-    }),
+    lossPerSunM2: !withSun
+      ? []
+      : shell.groups.map((group, index) => {
+          const dark = results[1].fluxes[index]?.lossWM2 ?? 0;
+          const lit = group.flux(referenceInsideC, hours[1], screen, PROBE_SUN_WM2).lossWM2;
+          return ((lit - dark) / PROBE_SUN_WM2) * group.areaM2;
+        }),
     innerFaceC: curve((result) => result.fluxes[largest]?.faceTempsC[0] ?? referenceInsideC),
   };
 }
