@@ -5,6 +5,7 @@ import { animalHeat, type StockHeat } from "../livestock/animal-heat.ts";
 import { minimumVentilation } from "../livestock/minimum-ventilation.ts";
 import type { MonthUse } from "./house-input.ts";
 import type { HouseModel } from "./house-model.ts";
+import { nightLowRatio } from "./stock-night.ts";
 
 /** Relative humidity of cold outdoor air at night. Source [DESIGNNIGHT]. */
 export const NIGHT_HUMIDITY_FRAC = 0.85;
@@ -27,6 +28,8 @@ export interface GovernedAir {
 /** What the stock of one month gives off and the air it needs. */
 export interface HouseAir {
   stockAt(insideTempC: number): StockHeat;
+  /** Sensible heat at the low of the animals' night, as a share of its daily mean. */
+  nightRatio: number;
   flowsAt(insideTempC: number, outdoorTempC: number): GovernedAir;
 }
 
@@ -44,9 +47,10 @@ export function houseAir(model: HouseModel, use: MonthUse): HouseAir {
     governs: "leakage",
   };
   if (stock === null || use.headCount === 0 || !use.occupied)
-    return { stockAt: () => NO_STOCK, flowsAt: () => leaksAlone };
+    return { stockAt: () => NO_STOCK, nightRatio: 1, flowsAt: () => leaksAlone };
   const animal = knownClass(stock.classId);
   const massKg = massWithin(animal, use.massKg);
+  const nightRatio = nightLowRatio(animal);
   const stockAt = (houseTempC: number) =>
     animalHeat({
       animal,
@@ -63,9 +67,11 @@ export function houseAir(model: HouseModel, use: MonthUse): HouseAir {
     governs: leakM3H > fansM3H && input.leakageUnderFans !== "added" ? "leakage" : governs,
   });
   const { ventilation } = stock;
-  if (ventilation.mode === "typed") return { stockAt, flowsAt: () => withFans(ventilation.flowM3H, "typed") };
+  if (ventilation.mode === "typed")
+    return { stockAt, nightRatio, flowsAt: () => withFans(ventilation.flowM3H, "typed") };
   return {
     stockAt,
+    nightRatio,
     flowsAt(insideTempC, outdoorTempC) {
       const heat = stockAt(insideTempC);
       const minimum = minimumVentilation({

@@ -114,7 +114,7 @@ function hourOf(
     sunGainW: 0,
     groupSunWM2: [],
     lightsW: 0,
-    stockSensibleW: (insideTempC) => air.stockAt(insideTempC).sensibleW,
+    stockSensibleW: (insideTempC) => air.nightRatio * air.stockAt(insideTempC).sensibleW,
     installedHeatW: night.unitOutputsW.reduce((sum, output) => sum + output, 0),
   };
 }

@@ -13,6 +13,13 @@ export const planSources = {
       "Barns: animal heat at its low of the night, ventilation set for the wanted temperature and left there",
     read: "common practice",
   },
+  ACTIVITY: {
+    author: "Pedersen, S. and Sällvik, K. (eds.)",
+    year: 2002,
+    title: "4th report of the working group on climatization of animal houses, CIGR",
+    part: "daily course of animal activity; amplitudes typical",
+    read: "from memory",
+  },
   PLANMARGIN: {
     author: "trade practice",
     year: 2026,

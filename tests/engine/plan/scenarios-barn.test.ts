@@ -126,8 +126,9 @@ describe("room of 500 weaned pigs", () => {
   it("holds the rare night with 30 kW", () => {
     const plan = planHouse(room());
     expect(plan.sizing.verdictOnceInYears).toBe("holds");
-    // 28.2 kW are needed when the pigs give 6 kW; the tables used here give them more.
-    expect(plan.sizing.onceInYearsRequiredW).toBeLessThan(30_000);
+    // Animal heat comes from the tables used here, so 15 % are allowed.
+    expectNear(plan.sizing.onceInYearsRequiredW, 28_200, 0.15);
+    expectNear(plan.sizing.everydayRequiredW, 22_500, 0.15);
   });
 
   it("saves 224 W/K with an exchanger of 40 %", () => {

@@ -50,7 +50,7 @@ export function occupancyAssumptions(input: HousePlanInput): PlanAssumption[] {
         "Heat of the animals",
         stock.name,
         "",
-        "CIGR 4th report 2002 at house level, as a mean over the day",
+        "CIGR 4th report 2002 at house level; on design nights at the low of the animals' night, in the year as a mean over the day",
       ),
       entry(
         input,
