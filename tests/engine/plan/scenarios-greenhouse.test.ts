@@ -1,8 +1,8 @@
 import { describe, expect, it } from "vitest";
-import type { HousePlanInput } from "../../../server/engine/plan/house-input.ts";
 import { planHouse } from "../../../server/engine/plan/plan-house.ts";
 import { fromSi, toSi } from "../../../server/engine/units.ts";
-import { everyMonth, stationWithDesign, tunnel, typedCover } from "./example-houses.ts";
+import { typedCover } from "./example-houses.ts";
+import { doubleFilmTunnel, glasshouse, gutterRange, plate } from "./scenario-houses.ts";
 
 /** Hand-calculated houses, U-values typed as given. Loads agree within 5 %, temperatures within 1.5 °F or 1 K. */
 const WITHIN = 0.05;
@@ -11,41 +11,14 @@ function expectNear(value: number, expected: number, within = WITHIN) {
   expect(Math.abs(value / expected - 1), `${value} against ${expected}`).toBeLessThan(within);
 }
 
-const ft = (value: number) => toSi(value, "ft");
-const degF = (value: number) => toSi(value, "F");
 const inF = (value: number) => fromSi(value, "F");
 const btuU = (value: number) => toSi(value, "BtuHFt2F");
 const btuH = (watts: number) => fromSi(watts, "BtuH");
 
-function plate(label: string, kBtuH: number, basis: "input" | "output", count: number) {
-  return {
-    label,
-    typeId: "unit-fan",
-    ratedW: toSi(kBtuH, "kBtuH"),
-    basis,
-    efficiencyFrac: 0.8,
-    vented: true,
-    burnsFuel: true,
-    fuelId: "lpg",
-    count,
-  };
-}
-
 describe("double-film tunnel, 30 by 96 ft", () => {
   const film = typedCover(btuU(0.7), 0.68);
   const ends = typedCover(btuU(0.62), 0.7);
-  const plan = planHouse(
-    tunnel({
-      climate: stationWithDesign(degF(3), degF(-15)),
-      shape: { type: "roundArch", lengthM: ft(96), widthM: ft(30), riseM: ft(12), wallHeightM: 0 },
-      covers: { roof: film, sideWall: film, endWall: ends },
-      leakageAirChangesPerHour: 1,
-      floorEdgeLossWMK: 0,
-      months: everyMonth({ nightSetpointC: degF(60), daySetpointC: degF(65) }),
-      criticalTempC: degF(40),
-      heaters: [plate("Unit heater", 150, "input", 2)],
-    }),
-  );
+  const plan = planHouse(doubleFilmTunnel(film, ends));
   const january = plan.months[0]!;
 
   it("has the taped sizes", () => {
@@ -77,40 +50,8 @@ describe("double-film tunnel, 30 by 96 ft", () => {
   });
 });
 
-function venlo(heaterW: number): HousePlanInput {
-  const glass = typedCover(6.2, 0.8);
-  return tunnel({
-    climate: stationWithDesign(-10, -15),
-    shape: {
-      type: "venlo",
-      lengthM: 160,
-      spanWidthM: 4,
-      spanCount: 25,
-      gutterHeightM: 6,
-      roofSlopeDeg: 22.5,
-    },
-    covers: { roof: glass, sideWall: glass, endWall: glass },
-    leakageAirChangesPerHour: 0.5,
-    floorEdgeLossWMK: 0,
-    screen: {
-      name: "Screen",
-      emissivityIn: 0.5,
-      emissivityOut: 0.3,
-      longwaveTransmittance: 0.1,
-      solarTransmittance: 0.5,
-      savingFrac: 1 - 3.4 / 6.2,
-      coverageFrac: 1,
-      edgeGapM: 0,
-      opensForSnow: true,
-    },
-    months: everyMonth({ nightSetpointC: 18, daySetpointC: 20 }),
-    criticalTempC: 10,
-    heaters: [{ ...plate("Boiler", 100, "output", 1), ratedW: heaterW, basis: "output" }],
-  });
-}
-
 describe("Venlo-type glasshouse of 1.6 ha", () => {
-  const plan = planHouse(venlo(3_000_000));
+  const plan = planHouse(glasshouse(typedCover(6.2, 0.8)));
   const january = plan.months[0]!;
 
   it("has the areas and the volume", () => {
@@ -145,34 +86,7 @@ describe("Venlo-type glasshouse of 1.6 ha", () => {
 
 describe("gutter-connected range at 5,000 ft, ratings entered as output", () => {
   const sheet = typedCover(btuU(0.65), 0.7);
-  const range = (heaters: HousePlanInput["heaters"]) =>
-    planHouse(
-      tunnel({
-        site: {
-          latitudeDeg: 40,
-          longitudeDeg: 10,
-          elevationM: ft(5000),
-          shelter: "normal",
-          frostHollowK: 0,
-        },
-        climate: stationWithDesign(degF(-5), degF(-20), ft(5000)),
-        shape: {
-          type: "multiSpan",
-          lengthM: ft(144),
-          spanWidthM: ft(30),
-          spanCount: 3,
-          gutterHeightM: ft(12),
-          ridgeHeightM: ft(19.5),
-        },
-        covers: { roof: sheet, sideWall: sheet, endWall: sheet },
-        leakageAirChangesPerHour: 1,
-        floorEdgeLossWMK: 0,
-        months: everyMonth({ nightSetpointC: degF(65), daySetpointC: degF(68) }),
-        criticalTempC: degF(45),
-        heaters,
-      }),
-    );
-  const asPlates = range([plate("Unit heater", 250, "input", 6)]);
+  const asPlates = planHouse(gutterRange(sheet, [plate(250, "input", 6)]));
 
   it("needs what the hand calculation says in thin air", () => {
     expectNear(btuH(asPlates.sizing.everydayRequiredW), 1_159_000);
@@ -188,7 +102,7 @@ describe("gutter-connected range at 5,000 ft, ratings entered as output", () => 
   });
 
   it("catches the input entered as output", () => {
-    const mistaken = range([plate("Unit heater", 250, "output", 6)]);
+    const mistaken = planHouse(gutterRange(sheet, [plate(250, "output", 6)]));
     expect(mistaken.warnings.map((warning) => warning.code)).toContain("inputTakenForOutput");
   });
 });
