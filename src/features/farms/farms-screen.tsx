@@ -3,11 +3,11 @@ import { useState } from "react";
 import { Link, Navigate, useNavigate } from "react-router-dom";
 import type { FarmView } from "../../../server/contracts/farms.ts";
 import { Button } from "../../components/button.tsx";
+import { NewFarmForm } from "../../components/new-farm-form.tsx";
 import { PageState } from "../../components/page-state.tsx";
 import { farmsQuery } from "../../lib/farms-query.ts";
 import { counted } from "../../lib/format.ts";
 import { meQuery } from "../../lib/me-query.ts";
-import { NewFarmForm } from "./new-farm-form.tsx";
 
 function FarmLine({ farm }: { farm: FarmView }) {
   const named = (role: "advisor" | "farmer") =>

@@ -41,7 +41,12 @@ export function MapMoves({ buildings, chosenId, fitFirst, onSettled }: MapMovesP
     const point = L.latLng(chosen.latitudeDeg, chosen.longitudeDeg);
     if (!map.getBounds().pad(-0.08).contains(point)) map.panTo(point, { animate: false });
   }, [buildings, chosenId, map]);
-  // A sheet whose size changes (a turned phone, a resized window) must be measured again.
+  return null;
+}
+
+/** A sheet whose size changes (a turned phone, a resized window) must be measured again. */
+export function KeepSize() {
+  const map = useMap();
   useEffect(() => {
     const observer = new ResizeObserver(() => map.invalidateSize({ animate: false }));
     observer.observe(map.getContainer());

@@ -15,7 +15,7 @@ import { findHouses } from "./list/house-order.ts";
 import { MapControls } from "./map-controls.tsx";
 import { MapEmpty } from "./map-empty.tsx";
 import { MapLegend } from "./map-legend.tsx";
-import { boundsOf, FIT, MapMoves } from "./map-moves.tsx";
+import { boundsOf, FIT, KeepSize, MapMoves } from "./map-moves.tsx";
 import { PhoneSheet } from "./phone-sheet.tsx";
 import { useMapAddress } from "./use-map-address.ts";
 
@@ -48,7 +48,7 @@ export function MapScreen() {
   return (
     <div className="relative min-h-130 flex-1">
       <h1 className="sr-only">Map of the buildings</h1>
-      <div className="absolute inset-0 grid md:grid-cols-[minmax(360px,424px)_minmax(0,1fr)]">
+      <div className="absolute inset-0 max-md:flex max-md:flex-col md:grid md:grid-cols-[minmax(360px,424px)_minmax(0,1fr)]">
         <PhoneSheet label="Buildings">
           {all.length === 0 ? (
             <MapEmpty hasFarms={(farms.data ?? []).length > 0} />
@@ -71,7 +71,6 @@ export function MapScreen() {
           center={first ? [first.latitudeDeg, first.longitudeDeg] : EVERYWHERE}
           zoom={first?.zoom ?? 2}
           framed={!phone}
-          scaleClass={phone ? "top-2 left-2" : undefined}
           onMap={setMap}
         >
           <Footprints buildings={found} chosenId={chosenId} />
@@ -82,6 +81,7 @@ export function MapScreen() {
             fitFirst={first === null}
             onSettled={(at) => set({ at })}
           />
+          <KeepSize />
           <MapLegend />
           <MapControls
             className={phone ? "top-2 right-2" : "top-11 right-6"}

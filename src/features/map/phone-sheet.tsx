@@ -19,7 +19,7 @@ function nearest(wanted: number): SheetHeight {
   );
 }
 
-/** A sheet over the map with three heights: dragged by its grip, or stepped by tapping it. On a desk it is a column. */
+/** A sheet below the map with three heights: dragged by its grip, or stepped by tapping it. On a desk it is a column. */
 export function PhoneSheet({ label, children }: PhoneSheetProps) {
   const [height, setHeight] = useState<SheetHeight>("half");
   const [dragged, setDragged] = useState<number | null>(null);
@@ -48,7 +48,7 @@ export function PhoneSheet({ label, children }: PhoneSheetProps) {
     <section
       ref={sheet}
       aria-label={label}
-      className="flex min-h-0 flex-col bg-limewash max-md:absolute max-md:inset-x-0 max-md:bottom-0 max-md:z-[1000] max-md:h-(--sheet-height) max-md:border-t-2 max-md:border-ink md:border-r-2 md:border-ink"
+      className="flex min-h-0 flex-col bg-limewash max-md:order-2 max-md:h-(--sheet-height) max-md:flex-none max-md:border-t-2 max-md:border-ink md:border-r-2 md:border-ink"
       style={{ "--sheet-height": `${(dragged ?? share[height]) * 100}%` } as CSSProperties}
     >
       <button

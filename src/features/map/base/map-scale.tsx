@@ -5,16 +5,15 @@ import { scaleBar } from "../geometry/scale-bar.ts";
 import { useSettledView } from "./use-view.ts";
 
 const EARTH_ROUND_M = 40_075_016.686;
-const MOST_PX = 190;
 
 /** A bar of a round length at the middle of the view, in kilometres or miles by the reader's units. */
-export function MapScale({ className = "" }: { className?: string }) {
+export function MapScale({ mostPx, className = "" }: { mostPx: number; className?: string }) {
   const map = useMap();
   const { system } = useUnits();
   useSettledView();
   const latitude = (map.getCenter().lat * Math.PI) / 180;
   const metresPerPx = (EARTH_ROUND_M * Math.cos(latitude)) / (256 * 2 ** map.getZoom());
-  const { widthPx, ticks, unit } = scaleBar(metresPerPx, MOST_PX, system);
+  const { widthPx, ticks, unit } = scaleBar(metresPerPx, mostPx, system);
   const quarter = widthPx / 4;
   const decimals = Number.isInteger(ticks[1]) ? 0 : 1;
   return (

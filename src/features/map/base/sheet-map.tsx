@@ -19,14 +19,13 @@ interface SheetMapProps {
   center: LatLngExpression;
   zoom: number;
   framed?: boolean;
-  scaleClass?: string;
   /** Hands out the map for moves asked for outside of it. */
   onMap?: (map: LeafletMap | null) => void;
   children?: ReactNode;
 }
 
 /** A sheet of map without a tile server: outlines, grid, names and scale, all from the product's own files. */
-export function SheetMap({ label, center, zoom, framed = true, scaleClass, onMap, children }: SheetMapProps) {
+export function SheetMap({ label, center, zoom, framed = true, onMap, children }: SheetMapProps) {
   return (
     <section aria-label={label} className="relative isolate h-full min-h-0 w-full">
       <MapContainer
@@ -47,7 +46,7 @@ export function SheetMap({ label, center, zoom, framed = true, scaleClass, onMap
         <WorldLayer />
         <MapFrame framed={framed} />
         <PlaceNames />
-        <MapScale className={scaleClass ?? (framed ? "bottom-5 left-11" : "bottom-2 left-2")} />
+        <MapScale mostPx={framed ? 190 : 110} className={framed ? "bottom-5 left-11" : "bottom-2 left-2"} />
         {children}
       </MapContainer>
     </section>

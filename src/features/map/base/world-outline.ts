@@ -13,7 +13,9 @@ export interface WorldOutline {
 }
 
 /** The atlas closes its polygons along the date line and the pole; nobody has seen a shore there. */
-const isSeam = ([longitude = 0, latitude = 0]: Position) => Math.abs(longitude) > 179.99 || latitude < -89.9;
+const onSeam = ([longitude = 0, latitude = 0]: Position) => Math.abs(longitude) > 179.99 || latitude < -89.9;
+const isSeam = (from: Position, to: Position) =>
+  (onSeam(from) && onSeam(to)) || Math.abs((from[0] ?? 0) - (to[0] ?? 0)) > 180;
 
 function withoutSeams(lines: MultiLineString): MultiLineString {
   const kept: Position[][] = [];
@@ -21,7 +23,7 @@ function withoutSeams(lines: MultiLineString): MultiLineString {
     let run: Position[] = [];
     line.forEach((point, index) => {
       const before = line[index - 1];
-      if (before !== undefined && isSeam(before) && isSeam(point)) {
+      if (before !== undefined && isSeam(before, point)) {
         if (run.length > 1) kept.push(run);
         run = [];
       }

@@ -30,7 +30,7 @@ export function Board({ kind, chosen = false, face }: BoardProps) {
   const many = "count" in face;
   return (
     <span
-      className={`relative block origin-bottom ${chosen ? "scale-140 text-sheet" : "text-ink"}`}
+      className={`relative isolate block origin-bottom ${chosen ? "scale-140 text-sheet" : "text-ink"}`}
       style={{ width: WIDTH_PX, height: HEIGHT_PX }}
     >
       <svg
@@ -56,7 +56,7 @@ export function Board({ kind, chosen = false, face }: BoardProps) {
           strokeDasharray={chosen ? undefined : look.dash}
         />
       </svg>
-      <span className="absolute inset-x-0 top-0 flex h-[38px] items-center justify-center">
+      <span className="absolute inset-x-0 top-0 z-[201] flex h-[38px] items-center justify-center">
         {many ? (
           <b className="text-lg">{face.count}</b>
         ) : (
@@ -69,7 +69,7 @@ export function Board({ kind, chosen = false, face }: BoardProps) {
         )}
       </span>
       {kind === "holds" || kind === "notApplicable" ? null : (
-        <span className="absolute -top-2.5 -right-2.5 rounded-full bg-sheet text-ink">
+        <span className="absolute -top-2.5 -right-2.5 z-[201] rounded-full bg-sheet text-ink">
           <VerdictMark kind={kind} size={20} />
         </span>
       )}

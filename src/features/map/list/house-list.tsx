@@ -67,7 +67,7 @@ export function HouseList(props: HouseListProps) {
   }, [chosenId]);
   return (
     <div className="flex min-h-0 flex-1 flex-col">
-      <div className="grid gap-3 border-b border-ink p-4">
+      <div className="grid gap-3 border-b border-ink p-4 max-md:pt-0">
         <label className="flex min-h-11.5 items-center gap-3 rounded-control border-[1.5px] border-rule-strong bg-sheet px-3 focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-focus">
           <Search size={20} aria-hidden="true" className="flex-none" />
           <span className="sr-only">Find a farm, building or place</span>

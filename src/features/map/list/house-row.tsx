@@ -37,8 +37,8 @@ export function HouseRow({ building, units, chosen, onChoose }: HouseRowProps) {
           status={kind === "unfinished" ? "unfinished" : "holds"}
         />
         <span className="min-w-0 flex-1">
-          <b className="block truncate">{building.name}</b>
-          <span className="block truncate text-sm text-ink-2">{building.farmName}</span>
+          <b className="block leading-tight break-words">{building.name}</b>
+          <span className="block text-sm text-ink-2">{building.farmName}</span>
         </span>
         <span className="flex-none text-right">
           <span

@@ -1,12 +1,12 @@
 import { type FormEvent, useState } from "react";
-import type { Position } from "../../../server/contracts/common.ts";
-import type { FarmView } from "../../../server/contracts/farms.ts";
-import { Button } from "../../components/button.tsx";
-import { PlaceSearch } from "../../components/place-search.tsx";
-import { PositionFields } from "../../components/position-fields.tsx";
-import { TextField } from "../../components/text-field.tsx";
-import { ApiError } from "../../lib/api-client.ts";
-import { useCreateFarm } from "./api.ts";
+import type { Position } from "../../server/contracts/common.ts";
+import type { FarmView } from "../../server/contracts/farms.ts";
+import { ApiError } from "../lib/api-client.ts";
+import { useCreateFarm } from "../lib/create-farm.ts";
+import { Button } from "./button.tsx";
+import { PlaceSearch } from "./place-search.tsx";
+import { PositionFields } from "./position-fields.tsx";
+import { TextField } from "./text-field.tsx";
 
 interface NewFarmFormProps {
   cooperativeId: string;

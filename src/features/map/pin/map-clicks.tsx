@@ -1,0 +1,14 @@
+import { useMapEvents } from "react-leaflet";
+import { type GroundPoint, wrapLongitude } from "../geometry/footprint.ts";
+
+/** Where the map was clicked, to the decimal a click can mean. */
+export function MapClicks({ onClick }: { onClick(point: GroundPoint): void }) {
+  useMapEvents({
+    click: ({ latlng }) =>
+      onClick({
+        latitudeDeg: Number(latlng.lat.toFixed(6)),
+        longitudeDeg: wrapLongitude(Number(latlng.lng.toFixed(6))),
+      }),
+  });
+  return null;
+}
