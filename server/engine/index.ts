@@ -16,21 +16,156 @@ export { ENGINE_VERSION } from "./version.ts";
 
 // -- air
 
+// Moist air: water, volume, heat, dew point, pressure with height.
+export {
+  airDensityKgM3,
+  airHeatCapacityWhM3K,
+  dewPointC,
+  enthalpyKjKg,
+  evaporationHeatKjKg,
+  humidityRatio,
+  humidityRatioFromPressure,
+  pressureAtAltitudePa,
+  relativeHumidityFrac,
+  specificVolumeM3Kg,
+  vapourPressureFromRatioPa,
+  vapourPressurePa,
+} from "./air/moist-air.ts";
+// Saturation over ice and water, and its inverse.
+export { dewPointFromPressureC, saturationPressurePa } from "./air/saturation.ts";
+
 // -- sun
+
+// Length of the beam's path through the air.
+export { absoluteAirMass, relativeAirMass } from "./solar/air-mass.ts";
+// Clear-sky sun by two models.
+export { haurwitzWM2, ineichenPerez } from "./solar/clear-sky.ts";
+// Diffuse share of the sun, hours of a day.
+export {
+  diffuseHourShareOfDay,
+  diffuseShareErbs,
+  diffuseShareMonthly,
+  diffuseShareOrgillHollands,
+  hourShareOfDay,
+} from "./solar/decomposition.ts";
+// Declination, equation of time, distance, sunset, sun outside the air.
+export {
+  dailyExtraterrestrialKwhM2,
+  declinationDeg,
+  distanceFactor,
+  equationOfTimeMin,
+  sunsetHourAngleDeg,
+} from "./solar/extraterrestrial.ts";
+// Angle of the beam on a plane.
+export { incidenceCosine } from "./solar/incidence.ts";
+// Diffuse sky with rings around sun and horizon.
+export { perezDiffuse } from "./solar/perez.ts";
+export type { SunHour } from "./solar/representative-day.ts";
+// A month's mean day in 24 hours.
+export { representativeDaySun } from "./solar/representative-day.ts";
+export type { SunPosition } from "./solar/sun-position.ts";
+// Where the sun stands.
+export { representativeDayOfYear, solarMidnightMs, sunPosition } from "./solar/sun-position.ts";
+export type { DiffuseModel, FlatIrradiance, PlaneIrradiance } from "./solar/transposition.ts";
+// Sun on any plane by five models.
+export { diffuseModels, planeIrradiance } from "./solar/transposition.ts";
 
 // -- geometry
 
-// -- ground and leakage
+export type { GeoPoint } from "./geometry/footprint.ts";
+// Corners of a ground plan on the globe.
+export { footprintCorners } from "./geometry/footprint.ts";
+export type { HouseGeometry, Surface, SurfaceRole } from "./geometry/house-geometry.ts";
+// Surfaces, areas and volume of a house.
+export { houseGeometry } from "./geometry/house-geometry.ts";
+export type { HouseShape } from "./geometry/house-shape.ts";
+export type { SectionPoint } from "./geometry/section.ts";
+// Across-section for drawing.
+export { archHalfAngle, sectionOutline, spanSection } from "./geometry/section.ts";
 
 // -- envelope
 
+// Resistance of closed air layers.
+export { airLayerM2KW } from "./envelope/air-layer.ts";
+// Walls with studs and other bridges.
+export { bridgedConduction } from "./envelope/bridged-conduction.ts";
+export type { OutsideModel } from "./envelope/convection.ts";
+// Convection outside, inside and in air layers.
+export {
+  airLayerConvectionWM2K,
+  insideConvectionWM2K,
+  outsideConvectionWM2K,
+  outsideModels,
+} from "./envelope/convection.ts";
+export type { CoverBalance, CoverBoundary, CoverSolver } from "./envelope/cover-balance.ts";
+// Heat balance of a cover of several layers.
+export { FLOOR_EMISSIVITY, prepareCoverSolver, solveCoverBalance } from "./envelope/cover-balance.ts";
+export type { CoverGap, CoverLayer, CoverStack } from "./envelope/cover-types.ts";
+export type { ConductionLayer, ConductionResult } from "./envelope/layered-conduction.ts";
+// One flow through layers in series.
+export { layeredConduction, layerResistanceM2KW } from "./envelope/layered-conduction.ts";
+// Fourth-power law: bodies, plates, sunlit bodies.
+export { blackBodyWM2, parallelPlatesWM2, radiativeBalanceTempC } from "./envelope/longwave.ts";
+// How radiation is shared out in a stack.
+export { longwaveExchange } from "./envelope/longwave-exchange.ts";
+// Whole-cover U-value at stated reference conditions.
+export { REFERENCE_CONDITIONS, referenceUValueWM2K } from "./envelope/reference-u-value.ts";
+export type { SkyModel } from "./envelope/sky.ts";
+// Sky emissivity and temperature by eight models, cloud, view factors.
+export {
+  cloudFromClearnessFrac,
+  cloudySkyEmissivity,
+  skyEmissivity,
+  skyModels,
+  skyTemperatureC,
+  skyTempFromEmissivityC,
+  viewFactors,
+} from "./envelope/sky.ts";
+export type { HeatFlowDirection } from "./envelope/surface-resistance.ts";
+// Surface resistances by formula and by convention.
+export {
+  blackRadiativeWM2K,
+  conventionalSurfaceM2KW,
+  insideSurfaceM2KW,
+  outsideSurfaceM2KW,
+} from "./envelope/surface-resistance.ts";
+// A cover with water on its inner face.
+export { wetInside } from "./envelope/wet-cover.ts";
+
 // -- livestock
+
+export type { AnimalClass, AnimalState, SplitGroup } from "./livestock/animal-classes.ts";
+// Total heat of an animal by class.
+export { animalClasses, massRangeKg, splitGroup, totalHeatAt20W } from "./livestock/animal-classes.ts";
+export type { StockHeat } from "./livestock/animal-heat.ts";
+// Heat, water and carbon dioxide of a herd or flock.
+export { animalHeat, CARBON_DIOXIDE_M3H_PER_KW } from "./livestock/animal-heat.ts";
+// Split into air and water, activity through the day.
+export { activityRatio, unitHeat } from "./livestock/house-split.ts";
+export type { MinimumVentilation, VentilationRule } from "./livestock/minimum-ventilation.ts";
+// Least ventilation, leaks, heat recovery, balance temperature.
+export {
+  balanceTempC,
+  fanAndLeakM3H,
+  heatRecoveryFrac,
+  minimumVentilation,
+} from "./livestock/minimum-ventilation.ts";
 
 // -- heaters
 
-// -- fuel, money, bills
+// What a heater really gives.
+export { altitudeFactor, deliveredOutputW } from "./heaters/delivered-output.ts";
+// Ways to fit a house.
+export { heaterCandidates, withoutLargestW } from "./heaters/heater-candidates.ts";
+// Sizes heaters are made in.
+export { nextStepW, outputStepsW } from "./heaters/size-steps.ts";
+// Burners without a flue.
+export { combustionProducts, unventedBurner } from "./heaters/unvented.ts";
 
 // -- failure
+
+// Cooling of a house without heat, carbon dioxide without air.
+export { endTempC, hoursToCarbonDioxide, hoursToTemp, tempAfterHoursC } from "./failure/cooling.ts";
 
 // -- climate
 

@@ -6,11 +6,4 @@ export const airSources = {
     part: "chapter 1, psychrometrics",
     read: "from memory",
   },
-  "ASHRAE-VENT": {
-    author: "ASHRAE",
-    year: 2015,
-    title: "Handbook, HVAC Applications",
-    part: "environmental control for animals and plants",
-    read: "from memory",
-  },
 } as const;

@@ -163,6 +163,7 @@ export function massRangeKg(animal: AnimalClass): { minKg: number; maxKg: number
   return { minKg, maxKg };
 }
 
+/** Which house-level split of heat a class follows. Errors none. Source [CIGR2002]. */
 export function splitGroup(animal: AnimalClass): SplitGroup {
   return rules[animal].split;
 }

@@ -1,3 +1,4 @@
+import { findZero } from "../balance/find-zero.ts";
 import { hoursToCritical } from "../sizing/hours-to-critical.ts";
 import { totalOutputW } from "../sizing/installed-units.ts";
 import { judgedOptions } from "../sizing/judge-options.ts";
@@ -43,6 +44,7 @@ export function planSizing(
     largestUnitOutSettlesAtC: rare.onceInYears.largestUnitOut?.settlesAtC ?? settlesWithC(0),
     hoursToCriticalLow: hours.low,
     hoursToCriticalHigh: hours.high,
+    balanceTempC: balanceOutdoorC(model, climate, rare),
     options:
       reason !== null || targetW <= 0
         ? []
@@ -110,6 +112,33 @@ function coolingHours(model: HouseModel, night: HouseBalance) {
     outdoorTempC: night.outdoorTempC,
     criticalTempC: model.input.criticalTempC,
     remainingHeatW: night.gainsW.stock,
+  });
+}
+
+/** Coldest and warmest outdoor temperature the balance temperature is looked for in, °C. */
+const BALANCE_SEARCH_C = { coldest: -55, belowInsideK: 0.5 } as const;
+
+/** Outdoor temperature at which the stock just covers shell and air at night; null without stock. Source [DESIGNNIGHT]. */
+function balanceOutdoorC(model: HouseModel, climate: PlanClimate, worst: MonthResult): number | null {
+  const use = model.input.months[worst.month - 1];
+  if (model.input.stock === null || use === undefined || use.headCount === 0 || !use.occupied) return null;
+  const surplusW = (outdoorTempC: number) => {
+    const balance = usualNight(model, {
+      month: worst.month,
+      use,
+      outdoorTempC,
+      windMS: climate.windMS[worst.month - 1] ?? 0,
+      soilTempC: climate.soilTempC,
+      unitOutputsW: [],
+    });
+    return balance.surplusW - balance.requiredHeatW;
+  };
+  const warmestC = Math.min(45, worst.setpointNightC - BALANCE_SEARCH_C.belowInsideK);
+  return findZero(surplusW, {
+    low: BALANCE_SEARCH_C.coldest,
+    high: warmestC,
+    guess: (worst.climate.onceInYearsDesignC + worst.setpointNightC) / 2,
+    tolerance: 1e-3,
   });
 }
 

@@ -149,6 +149,8 @@ export interface PlanSizing {
   /** Hours until the critical temperature when all heat stops on the once-in-N-years night: low and high end. */
   hoursToCriticalLow: number | null;
   hoursToCriticalHigh: number | null;
+  /** Stocked barns: outdoor temperature down to which the animals' own heat is enough in the worst month; null elsewhere. */
+  balanceTempC?: number | null;
   options: HeaterOption[];
   /** Filled where no heater is the right answer, with the reason in words. */
   noHeaterReason: string | null;

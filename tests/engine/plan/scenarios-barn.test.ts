@@ -131,6 +131,14 @@ describe("room of 500 weaned pigs", () => {
     expectNear(plan.sizing.everydayRequiredW, 22_500, 0.15);
   });
 
+  it("needs no heat down to its balance temperature", () => {
+    const { balanceTempC } = planHouse(room()).sizing;
+    // 28 °C less the pigs' night heat over 713 W/K.
+    const stockW = planHouse(room()).months[0]!.everyday.screensShut!.gainsW.stock;
+    expect(balanceTempC).toBeCloseTo(28 - stockW / 713, 0);
+    expect(planHouse(nursery({ stock: null })).sizing.balanceTempC).toBeNull();
+  });
+
   it("saves 224 W/K with an exchanger of 40 %", () => {
     const without = planHouse(room()).months[0]!.everyday.screensShut!;
     const stock = { ...room().stock!, heatRecoveryFrac: 0.4 };

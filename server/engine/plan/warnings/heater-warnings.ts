@@ -1,4 +1,5 @@
 import { altitudeFactor } from "../../heaters/delivered-output.ts";
+import { combustionProducts } from "../../heaters/unvented.ts";
 import { totalOutputW } from "../../sizing/installed-units.ts";
 import type { HeaterInput } from "../house-input.ts";
 import type { PlanWarning } from "../plan-types.ts";
@@ -84,15 +85,21 @@ function sizeWarnings({ model, sizing, units }: WarningContext): PlanWarning[] {
   return found;
 }
 
-function fluelessWarnings({ model }: WarningContext): PlanWarning[] {
+function fluelessWarnings({ model, sizing }: WarningContext): PlanWarning[] {
   const flueless = model.input.heaters.filter((heater) => heater.burnsFuel && !heater.vented);
-  if (flueless.length === 0) return [];
+  const first = flueless[0];
+  if (first === undefined) return [];
+  const neededKw = Math.min(sizing.onceInYearsRequiredW, sizing.installedW) / 1000;
+  const products = Object.entries(combustionProducts).find(([fuelId]) => fuelId === first.fuelId)?.[1];
+  const waterKgH = products ? (neededKw / products.sensibleFrac) * products.waterKgKwh : 0;
+  const amount =
+    waterKgH >= 0.5 ? ` On the coldest night that is about ${Math.round(waterKgH)} kg of water an hour.` : "";
   const greenhouse = model.input.kind === "greenhouse";
   return [
     warning(
       "caution",
       "noFlue",
-      "Burners without a flue leave their water and gases in the house.",
+      `Burners without a flue leave their water and gases in the house.${amount}`,
       greenhouse
         ? "Their water must leave with the air, and traces of ethylene harm crops. Vented heaters avoid both."
         : "The air they need is not in the ventilation counted here. Check carbon dioxide and carbon monoxide while they run.",
