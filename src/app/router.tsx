@@ -44,7 +44,11 @@ export function createRouter() {
       errorElement: <RouteError />,
       hydrateFallbackElement,
       // A screen that fails keeps the head of the sheet around it.
-      children: screens.map((screen) => ({ ...screen, errorElement: <RouteError /> })),
+      children: screens.map((screen) => ({
+        ...screen,
+        errorElement: <RouteError />,
+        hydrateFallbackElement,
+      })),
     },
   ]);
 }

@@ -19,6 +19,15 @@ interface CapacityBarProps {
   height?: number;
 }
 
+/** About how wide a bar is on a phone and on a desk. */
+const NARROW_PX = 300;
+const WIDE_PX = 420;
+const LETTER_PX = 8.2;
+
+function wordsFit(part: CapacityPart, barPx: number): boolean {
+  return part.share * barPx > part.words.length * LETTER_PX + 20;
+}
+
 /** Heaters end to end at one scale, with the need as an upright line and the missing part hatched. */
 export function CapacityBar({ parts, needShare, sentence, shortWords, height = 30 }: CapacityBarProps) {
   const total = parts.reduce((sum, part) => sum + part.share, 0);
@@ -32,7 +41,13 @@ export function CapacityBar({ parts, needShare, sentence, shortWords, height = 3
           style={{ width: at(part.share) }}
           className={`flex items-center overflow-hidden border-[1.5px] border-ink px-2 text-sm font-bold whitespace-nowrap not-first:border-l-0 ${part.fresh ? "bg-bottle-tint" : "bg-trough"}`}
         >
-          {part.share > 0.09 ? <span className="relative z-1 bg-inherit px-0.5">{part.words}</span> : null}
+          {wordsFit(part, NARROW_PX) || wordsFit(part, WIDE_PX) ? (
+            <span
+              className={`relative z-1 bg-inherit px-0.5 ${wordsFit(part, NARROW_PX) ? "" : "max-md:hidden"}`}
+            >
+              {part.words}
+            </span>
+          ) : null}
         </div>
       ))}
       {missing > 0.002 ? (

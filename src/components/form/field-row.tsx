@@ -14,18 +14,20 @@ interface FieldRowProps {
 
 /** One question: words at the left, the control, and where the answer came from. */
 export function FieldRow({ label, hint, error, errorId, hintId, control, origin, active }: FieldRowProps) {
+  const rows = hint ? "md:row-span-2" : "";
   return (
     <div className="grid grid-cols-[minmax(0,1fr)_216px] items-center gap-x-3 border-b border-rule px-4 pt-1.5 md:grid-cols-[minmax(0,1fr)_250px_112px] md:px-0">
-      <div className={active ? "font-bold" : ""}>
-        {label}
-        {hint ? (
-          <span id={hintId} className="block text-xs font-normal text-ink-2">
-            {hint}
-          </span>
-        ) : null}
-      </div>
-      <div className="max-md:row-span-2">{control}</div>
-      <div className="max-md:col-start-1 max-md:row-start-2 max-md:-ml-1">{origin}</div>
+      <div className={`${active ? "font-bold" : ""} ${hint ? "md:self-end" : ""}`}>{label}</div>
+      <div className={`max-md:row-span-2 ${rows}`}>{control}</div>
+      <div className={`max-md:col-start-1 max-md:row-start-2 max-md:-ml-1 ${rows}`}>{origin}</div>
+      {hint ? (
+        <div
+          id={hintId}
+          className="text-xs text-ink-2 max-md:col-span-full md:col-start-1 md:row-start-2 md:self-start"
+        >
+          {hint}
+        </div>
+      ) : null}
       <p
         id={errorId}
         aria-live="polite"

@@ -58,7 +58,7 @@ export function SectionNight({ shape, shell, system, outsideC, insideC, cold }: 
       <text x={px(x)} y={px(y + 18)} fontSize="20" fontWeight="700" textAnchor="middle" fill={edge}>
         {inside}
       </text>
-      <ScaleBar frame={frame} system={system} x={fit.width - 120} y={fit.height - 14} />
+      <ScaleBar frame={frame} system={system} x={14} y={fit.height - 14} />
     </svg>
   );
 }

