@@ -24,7 +24,7 @@ const FLOOR_LAYER_JM2K = 0.025 * 2.1e6;
 const FLOOR_COUPLING_WM2K = 6;
 
 /**
- * Hours until a house whose heat has stopped reaches its critical temperature.
+ * Hours until a house whose heat has stopped, its fans running on, reaches its critical temperature.
  * Low end: only air and fittings cool, held up by a floor that stays warm; where that floor alone would save the house, and for
  * the high end, the top of the floor cools along. Null where the temperature is never reached.
  * Shape: house → hours. Throws EngineInputError as the cooling functions do. Source [COOLINGMASS], [LUMPED].
