@@ -290,9 +290,18 @@ export type { HouseModel } from "./plan/house-model.ts";
 export { houseModel } from "./plan/house-model.ts";
 export type { NightInput } from "./plan/night-balances.ts";
 // A design night in every state that matters.
-export { nightBalances, usualNight } from "./plan/night-balances.ts";
+export { designSetpointC, insideHumidityFrac, nightBalances, usualNight } from "./plan/night-balances.ts";
+// Why no heater is the right answer.
+export { isColdHoused, noHeaterReason } from "./plan/no-heater.ts";
+// Parts of a plan: fuel of the year, climate of the site, a month's energy, the months, the sizing.
+export { meanEfficiencyFrac, planAnnual } from "./plan/plan-annual.ts";
+export type { PlanClimate } from "./plan/plan-climate.ts";
+export { planClimate } from "./plan/plan-climate.ts";
+export { planMonthEnergy } from "./plan/plan-energy.ts";
 // The whole plan of a house.
 export { planHouse } from "./plan/plan-house.ts";
+export { planMonths } from "./plan/plan-months.ts";
+export { PICKUP_MARGIN_FRAC, planSizing } from "./plan/plan-sizing.ts";
 export type {
   GainPath,
   HoldVerdict,
@@ -310,6 +319,8 @@ export type {
   SurfaceFlow,
 } from "./plan/plan-types.ts";
 export type { HeaterOption, HeaterUnit } from "./plan/sizing-types.ts";
+// Animals' heat at the low of their night.
+export { nightLowRatio } from "./plan/stock-night.ts";
 export type { CoolingHouse, HoursRange } from "./sizing/hours-to-critical.ts";
 // Hours until the critical temperature when all heat stops.
 export { hoursToCritical } from "./sizing/hours-to-critical.ts";
@@ -318,3 +329,6 @@ export { installedUnits, totalOutputW, unitOutputsW } from "./sizing/installed-u
 export type { OptionJudge } from "./sizing/judge-options.ts";
 // Ways of fitting a house, each judged on both nights.
 export { judgedOptions } from "./sizing/judge-options.ts";
+export type { Source } from "./sources.ts";
+// Every source the engine cites, by its key.
+export { engineSources } from "./sources.ts";
