@@ -66,7 +66,7 @@ export function PositionFields({ position, onPosition, problem }: PositionFields
         />
       </div>
       {problem || deviceProblem ? (
-        <p role="alert" className="m-0 mt-1 text-sm font-semibold text-redlead">
+        <p role="alert" data-problem="" className="m-0 mt-1 text-sm font-semibold text-redlead">
           {problem ?? deviceProblem}
         </p>
       ) : null}

@@ -5,6 +5,8 @@ import { scaleBar } from "../geometry/scale-bar.ts";
 import { useSettledView } from "./use-view.ts";
 
 const EARTH_ROUND_M = 40_075_016.686;
+/** A bar shorter than this has no room for its middle figure. */
+const NARROW_PX = 80;
 
 /** A bar of a round length at the middle of the view, in kilometres or miles by the reader's units. */
 export function MapScale({ mostPx, className = "" }: { mostPx: number; className?: string }) {
@@ -30,9 +32,11 @@ export function MapScale({ mostPx, className = "" }: { mostPx: number; className
         <rect x={2 * quarter} width={quarter} height={8} fill="var(--color-ink)" />
         <g fill="var(--color-ink)" fontSize={13} textAnchor="middle">
           <text y={-6}>0</text>
-          <text x={widthPx / 2} y={-6}>
-            {number(ticks[1], decimals)}
-          </text>
+          {widthPx < NARROW_PX ? null : (
+            <text x={widthPx / 2} y={-6}>
+              {number(ticks[1], decimals)}
+            </text>
+          )}
           <text x={widthPx} y={-6} textAnchor="start" dx={-8}>{`${number(ticks[2])} ${unit}`}</text>
         </g>
       </g>

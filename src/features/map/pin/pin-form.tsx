@@ -1,4 +1,4 @@
-import type { FormEvent, ReactNode } from "react";
+import { type FormEvent, type ReactNode, useEffect, useRef } from "react";
 import { Link } from "react-router-dom";
 import type { FarmView } from "../../../../server/contracts/farms.ts";
 import { Button, buttonLook } from "../../../components/button.tsx";
@@ -55,6 +55,14 @@ function bearingHint(draft: PinDraft): string {
 /** Whose, where, what and how large: enough to draw a house and find its weather. */
 export function PinForm(props: PinFormProps) {
   const { draft, onDraft, problems, asksFar, busy } = props;
+  const page = useRef<HTMLDivElement>(null);
+  const problemKeys = Object.keys(problems).join(" ");
+  useEffect(() => {
+    if (problemKeys === "") return;
+    const first = page.current?.querySelector<HTMLElement>('[aria-invalid="true"], [data-problem]');
+    first?.scrollIntoView?.({ block: "center" });
+    first?.focus({ preventScroll: true });
+  }, [problemKeys]);
   const set = (change: Partial<PinDraft>) => onDraft({ ...draft, ...change });
   const submit = (event: FormEvent) => {
     event.preventDefault();
@@ -63,7 +71,7 @@ export function PinForm(props: PinFormProps) {
   const positionProblem =
     problems["position.latitudeDeg"] ?? problems["position.longitudeDeg"] ?? problems.position;
   return (
-    <div className="min-h-0 flex-1 overflow-y-auto">
+    <div ref={page} className="min-h-0 flex-1 overflow-y-auto">
       <div className="border-b border-rule-strong px-5 py-4">
         <h1 className="m-0 font-sign text-xl font-extrabold">Pin a building</h1>
       </div>

@@ -1,4 +1,4 @@
-import type { Map as LeafletMap } from "leaflet";
+import L, { type Map as LeafletMap } from "leaflet";
 import { Spline } from "lucide-react";
 import { useState } from "react";
 import { useNavigate, useSearchParams } from "react-router-dom";
@@ -10,7 +10,7 @@ import { PHONE, useMedia } from "../../../lib/use-media.ts";
 import { usePinBuilding } from "../api/pin-building.ts";
 import { SheetMap } from "../base/sheet-map.tsx";
 import { Footprints } from "../boards/footprints.tsx";
-import { type GroundPoint, latLng } from "../geometry/footprint.ts";
+import { corners, type GroundPoint, latLng } from "../geometry/footprint.ts";
 import { houseFromClicks } from "../geometry/three-clicks.ts";
 import { MapControls } from "../map-controls.tsx";
 import { KeepSize } from "../map-moves.tsx";
@@ -25,7 +25,8 @@ import { StationLine } from "./station-line.tsx";
 
 const FARM_ZOOM = 13;
 const TOWN_ZOOM = 12;
-const YARD_ZOOM = 17;
+/** Room around the house, and no closer than a yard. */
+const CLOSE_UP = { padding: [150, 150] as [number, number], maxZoom: 19 };
 const WORLD = { center: [25, 10] as [number, number], zoom: 2 };
 
 interface PinPageProps {
@@ -69,6 +70,10 @@ export function PinPage({ farms, buildings, cooperativeId, system }: PinPageProp
     );
   };
   const footprint = footprintOf(draft);
+  const closeUp = () => {
+    if (draft.position === null || footprint === null) return;
+    map?.fitBounds(L.latLngBounds(corners(draft.position, footprint).map(latLng)), CLOSE_UP);
+  };
   return (
     <div className="relative min-h-130 flex-1">
       <div className="absolute inset-0 max-md:flex max-md:flex-col md:grid md:grid-cols-[minmax(380px,464px)_minmax(0,1fr)]">
@@ -124,7 +129,7 @@ export function PinPage({ farms, buildings, cooperativeId, system }: PinPageProp
                 {clicks === null ? "Draw with three clicks" : "Stop drawing"}
               </Button>
               {draft.position === null ? null : (
-                <Button kind="plain" onClick={() => draft.position && look(draft.position, YARD_ZOOM)}>
+                <Button kind="plain" onClick={closeUp}>
                   Show close up
                 </Button>
               )}

@@ -23,6 +23,9 @@ const LEAST_M = 2;
 const MOST_M = 1000;
 /** Smaller than this on the screen, grips would cover the house. */
 const LEAST_PX = 46;
+/** Smaller than this, the sizes would run into the grips. */
+const LABEL_PX = 110;
+const FOLLOW_ZOOM = 10;
 
 interface PlanOnMapProps {
   position: Position;
@@ -42,6 +45,11 @@ export function PlanOnMap({ position, footprint, onMove, onResize }: PlanOnMapPr
   useEffect(() => {
     if (layer.current) L.DomEvent.disableClickPropagation(layer.current);
   }, []);
+  useEffect(() => {
+    // Typed degrees may lie on the other side of the world; the map follows the pin.
+    const point = latLng(position);
+    if (!map.getBounds().contains(point)) map.setView(point, Math.max(map.getZoom(), FOLLOW_ZOOM));
+  }, [map, position]);
   const move = (to: GroundPoint) =>
     onMove({
       latitudeDeg: Number(to.latitudeDeg.toFixed(6)),
@@ -51,7 +59,8 @@ export function PlanOnMap({ position, footprint, onMove, onResize }: PlanOnMapPr
   const side = footprint ? fromMiddle(position, footprint.bearingDeg, 0, footprint.widthM / 2) : position;
   const middlePx = map.latLngToLayerPoint(latLng(position));
   const endPx = map.latLngToLayerPoint(latLng(end));
-  const close = footprint !== null && middlePx.distanceTo(endPx) * 2 > LEAST_PX;
+  const lengthPx = middlePx.distanceTo(endPx) * 2;
+  const close = footprint !== null && lengthPx > LEAST_PX;
   const sideText = fromMiddle(position, footprint?.bearingDeg ?? 0, 0, -(footprint?.widthM ?? 0) / 2);
   const label = (at: GroundPoint, text: string) => {
     const point = map.latLngToLayerPoint(latLng(at));
@@ -87,19 +96,23 @@ export function PlanOnMap({ position, footprint, onMove, onResize }: PlanOnMapPr
         <div ref={layer}>
           {close ? (
             <>
-              {label(
-                fromMiddle(
-                  position,
-                  footprint.bearingDeg,
-                  -footprint.lengthM / 2 - footprint.lengthM * 0.06 - 1,
-                  0,
-                ),
-                lengthText(footprint.lengthM, units.system),
-              )}
-              {label(
-                fromMiddle(sideText, footprint.bearingDeg, 0, -footprint.widthM * 0.12 - 1),
-                lengthText(footprint.widthM, units.system),
-              )}
+              {lengthPx > LABEL_PX ? (
+                <>
+                  {label(
+                    fromMiddle(
+                      position,
+                      footprint.bearingDeg,
+                      -footprint.lengthM / 2 - footprint.lengthM * 0.06 - 1,
+                      0,
+                    ),
+                    lengthText(footprint.lengthM, units.system),
+                  )}
+                  {label(
+                    fromMiddle(sideText, footprint.bearingDeg, 0, -footprint.widthM * 0.12 - 1),
+                    lengthText(footprint.widthM, units.system),
+                  )}
+                </>
+              ) : null}
               <DragHandle
                 at={end}
                 onDrag={(to) => {
