@@ -83,8 +83,10 @@ export function yearlyEverydayDesign(
     annualPercentileFromMonthsC(station.meanTempC, hourlySpreadsK, share);
   if (station.yearlyColdest !== null) {
     const stepK = percent === 99 ? fromNormals(99) - fromNormals(99.6) : 0;
+    const derivedC = station.yearlyColdest.meanC + COLDEST_BELOW_996_K + stepK;
     return {
-      tempC: station.yearlyColdest.meanC + COLDEST_BELOW_996_K + stepK,
+      // Near the equator the rule would reach into the monthly means; a cold night lies at least one spread below them.
+      tempC: Math.min(derivedC, ...station.meanTempC.map((mean, m) => mean - (hourlySpreadsK[m] ?? 0))),
       origin: "derived",
       how: `From the mean of the yearly coldest temperatures of ${station.yearlyColdest.winters} winters.`,
     };
