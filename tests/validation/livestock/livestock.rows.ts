@@ -1,6 +1,7 @@
 import {
   type AnimalClass,
   type AnimalState,
+  type SplitGroup,
   totalHeatAt20W,
 } from "../../../server/engine/livestock/animal-classes.ts";
 import { animalHeat } from "../../../server/engine/livestock/animal-heat.ts";
