@@ -78,7 +78,11 @@ function usesOf(survey: Survey): Pick<HousePlanInput, "crop" | "stock" | "lampsW
       name: row.name,
       ventilation:
         winterVentilation === null
-          ? { mode: "balance", perHeadM3H: row.perHeadM3H }
+          ? {
+              mode: "balance",
+              perHeadM3H: row.perHeadM3H,
+              ...(row.perHeadPerKg075M3H === null ? {} : { perKg075M3H: row.perHeadPerKg075M3H }),
+            }
           : { mode: "typed", flowM3H: siValue(winterVentilation) },
       humidityLimitFrac: siValue(humidityLimit),
       carbonDioxideLimitPpm: row.carbonDioxideLimitPpm,
