@@ -1,7 +1,7 @@
-import L from "leaflet";
 import { LocateFixed, Maximize2, Minus, Plus } from "lucide-react";
-import { type ReactNode, useEffect, useRef, useState } from "react";
+import { type ReactNode, useState } from "react";
 import { useMap } from "react-leaflet";
+import { useShield } from "../../components/sheet-map/use-shield.ts";
 
 interface MapControlsProps {
   className?: string;
@@ -15,11 +15,8 @@ const CLOSE_ZOOM = 13;
 /** Nearer, farther, own position, everything. Leaflet must not take their clicks for clicks on the map. */
 export function MapControls({ className = "", onAll, children }: MapControlsProps) {
   const map = useMap();
-  const bar = useRef<HTMLDivElement>(null);
+  const bar = useShield<HTMLDivElement>();
   const [problem, setProblem] = useState("");
-  useEffect(() => {
-    if (bar.current) L.DomEvent.disableClickPropagation(bar.current);
-  }, []);
   const locate = () => {
     setProblem("");
     navigator.geolocation.getCurrentPosition(

@@ -43,14 +43,3 @@ export function MapMoves({ buildings, chosenId, fitFirst, onSettled }: MapMovesP
   }, [buildings, chosenId, map]);
   return null;
 }
-
-/** A sheet whose size changes (a turned phone, a resized window) must be measured again. */
-export function KeepSize() {
-  const map = useMap();
-  useEffect(() => {
-    const observer = new ResizeObserver(() => map.invalidateSize({ animate: false }));
-    observer.observe(map.getContainer());
-    return () => observer.disconnect();
-  }, [map]);
-  return null;
-}

@@ -5,9 +5,9 @@ import { useMemo, useState } from "react";
 import { Link } from "react-router-dom";
 import { buttonLook } from "../../components/button.tsx";
 import { PageState } from "../../components/page-state.tsx";
+import { SheetMap } from "../../components/sheet-map/sheet-map.tsx";
 import { buildingsQuery, farmsQuery } from "../../lib/farms-query.ts";
 import { PHONE, useMedia } from "../../lib/use-media.ts";
-import { SheetMap } from "./base/sheet-map.tsx";
 import { BoardsLayer } from "./boards/boards-layer.tsx";
 import { Footprints } from "./boards/footprints.tsx";
 import { HouseList } from "./list/house-list.tsx";
@@ -15,7 +15,7 @@ import { findHouses } from "./list/house-order.ts";
 import { MapControls } from "./map-controls.tsx";
 import { MapEmpty } from "./map-empty.tsx";
 import { MapLegend } from "./map-legend.tsx";
-import { boundsOf, FIT, KeepSize, MapMoves } from "./map-moves.tsx";
+import { boundsOf, FIT, MapMoves } from "./map-moves.tsx";
 import { PhoneSheet } from "./phone-sheet.tsx";
 import { useMapAddress } from "./use-map-address.ts";
 
@@ -81,7 +81,6 @@ export function MapScreen() {
             fitFirst={first === null}
             onSettled={(at) => set({ at })}
           />
-          <KeepSize />
           <MapLegend />
           <MapControls
             className={phone ? "top-2 right-2" : "top-11 right-6"}

@@ -1,18 +1,21 @@
 import { useQuery } from "@tanstack/react-query";
 import { Download, Printer } from "lucide-react";
+import { lazy, Suspense, useState } from "react";
 import { useSearchParams } from "react-router-dom";
-import type { SiteRow } from "../../../server/contracts/sites.ts";
 import { Button } from "../../components/button.tsx";
+import { downloadCsv } from "../../components/chart/csv.ts";
 import { PageState } from "../../components/page-state.tsx";
-import { type VerdictKind, verdictKind } from "../../components/plan/verdict.ts";
+import { verdictKind } from "../../components/plan/verdict.ts";
 import { Segmented } from "../../components/segmented.tsx";
-import { counted } from "../../lib/format.ts";
 import { meQuery } from "../../lib/me-query.ts";
 import { sitesQuery } from "../../lib/sites-query.ts";
-import { type Units, useUnits } from "../../lib/units.ts";
+import { useUnits } from "../../lib/units.ts";
+import { Answer } from "./answer.tsx";
 import { type SortKey, sortKeys, sortSites } from "./site-order.ts";
 import { sitesCsv } from "./sites-csv.ts";
 import { SitesTable } from "./sites-table.tsx";
+
+const SitesMap = lazy(async () => ({ default: (await import("./sites-map.tsx")).SitesMap }));
 
 const kindFilters = [
   { value: "all" as const, label: "All" },
@@ -24,47 +27,13 @@ const standingFilters = [
   { value: "short" as const, label: "Short" },
   { value: "tight" as const, label: "Nothing spare" },
   { value: "unfinished" as const, label: "Not known" },
+  { value: "holds" as const, label: "Enough" },
 ];
-
-function count(rows: SiteRow[], kind: VerdictKind): number {
-  return rows.filter((row) => verdictKind(row.plan) === kind).length;
-}
-
-/** The answer first, in one sentence with the numbers. */
-function Answer({ rows, units }: { rows: SiteRow[]; units: Units }) {
-  const short = rows.filter((row) => verdictKind(row.plan) === "short");
-  const shortW = short.reduce((sum, row) => sum + (row.plan?.shortW ?? 0), 0);
-  const farms = new Set(rows.map((row) => row.farmId)).size;
-  const unknown = count(rows, "unfinished");
-  return (
-    <p className="m-0 max-w-[70ch] text-lg">
-      <b>{counted(rows.length, "building")}</b> on <b>{counted(farms, "farm")}</b>.{" "}
-      {short.length === 0 ? (
-        <b>None is known to be short of heat on the coldest night in twenty years.</b>
-      ) : (
-        <b className="text-redlead">
-          {`${short.length} ${short.length === 1 ? "is" : "are"} short of heat on the coldest night in twenty years, by ${units.heat(shortW)} together.`}
-        </b>
-      )}{" "}
-      {`${count(rows, "tight")} hold with nothing spare, ${count(rows, "holds")} hold, ${count(rows, "notApplicable")} need no heater, `}
-      <b>{`${unknown} ${unknown === 1 ? "is" : "are"} not known.`}</b>
-    </p>
-  );
-}
-
-function download(rows: SiteRow[], units: Units): void {
-  const link = document.createElement("a");
-  link.href = URL.createObjectURL(
-    new Blob([`\uFEFF${sitesCsv(rows, units)}`], { type: "text/csv;charset=utf-8" }),
-  );
-  link.download = "sites.csv";
-  link.click();
-  URL.revokeObjectURL(link.href);
-}
 
 /** The manager's page: which houses hold, which do not, and which nobody knows. Filter and order live in the address. */
 export function SitesScreen() {
   const units = useUnits();
+  const [chosenId, setChosenId] = useState<string | null>(null);
   const [search, setSearch] = useSearchParams();
   const { data: me } = useQuery(meQuery);
   const cooperativeId = me?.activeCooperativeId ?? "";
@@ -84,7 +53,7 @@ export function SitesScreen() {
       { replace: true },
     );
   const kind = pick("kind", ["all", "greenhouse", "barn"] as const, "all");
-  const standing = pick("standing", ["all", "short", "tight", "unfinished"] as const, "all");
+  const standing = pick("standing", ["all", "short", "tight", "unfinished", "holds"] as const, "all");
   const sort = { key: pick("by", sortKeys, "urgency"), reversed: search.get("down") === "1" };
   const rows = sites.data.rows.filter(
     (row) =>
@@ -100,6 +69,10 @@ export function SitesScreen() {
       },
       { replace: true },
     );
+  const show = (buildingId: string) => {
+    setChosenId(buildingId);
+    document.querySelector(`[data-row="${CSS.escape(buildingId)}"]`)?.scrollIntoView({ block: "center" });
+  };
   if (sites.data.rows.length === 0) {
     return (
       <PageState
@@ -110,12 +83,12 @@ export function SitesScreen() {
     );
   }
   return (
-    <div className="flex flex-col">
+    <div className="flex flex-1 flex-col">
       <div className="flex flex-wrap items-center justify-between gap-4 border-b border-rule-strong bg-sheet px-5 py-4">
         <h1 className="sr-only">Compare sites</h1>
         <Answer rows={sites.data.rows} units={units} />
         <div className="flex flex-wrap gap-3 print:hidden">
-          <Button kind="plain" onClick={() => download(sorted, units)}>
+          <Button kind="plain" onClick={() => downloadCsv("sites.csv", sitesCsv(sorted, units))}>
             <Download size={18} aria-hidden="true" />
             Table as CSV
           </Button>
@@ -139,17 +112,34 @@ export function SitesScreen() {
           onChange={(value) => set("standing", value)}
         />
       </div>
-      <div className="px-5 pb-8">
-        {sorted.length === 0 ? (
-          <p>No building fits this choice.</p>
-        ) : (
-          <SitesTable rows={sorted} units={units} sort={sort} onSort={order} />
-        )}
-        <p className="max-w-[80ch] text-sm text-ink-2">
-          “Known” is the share of answers that were measured or read off a plate or a bill. “Until critical”
-          is how long a house takes to its critical temperature when all heat stops on that night; the true
-          time lies somewhere in the range.
-        </p>
+      <div className="grid min-h-0 flex-1 border-t border-rule-strong xl:grid-cols-[minmax(0,1fr)_340px]">
+        <div className="overflow-x-auto px-3 pb-8 max-md:px-5">
+          <SitesTable rows={sorted} units={units} sort={sort} chosenId={chosenId} onSort={order} />
+          <p className="max-w-[86ch] px-2 text-sm text-ink-2">
+            Circle: where the house settles. Triangle: the temperature wanted. Hatched: what is missing.
+            “Known” is the share of answers that were measured or read off a plate or a bill. “Until critical”
+            is how long a house takes to its critical temperature when all heat stops on that night; the true
+            time lies somewhere in the range.
+          </p>
+        </div>
+        <section
+          aria-labelledby="sites-map"
+          className="border-ink max-xl:border-t-2 max-md:hidden xl:border-l-2 print:hidden"
+        >
+          <div className="sticky top-0 p-4">
+            <h2 id="sites-map" className="m-0 mb-2 font-sign text-lg font-bold">
+              Where they are
+            </h2>
+            <div className="h-96 border border-ink">
+              <Suspense fallback={<PageState kind="loading" words="Fetching the map" />}>
+                <SitesMap rows={sorted} onChoose={show} />
+              </Suspense>
+            </div>
+            <p className="text-sm text-ink-2">
+              Numbers match the table. Filled red: will not hold. Dashed: not known.
+            </p>
+          </div>
+        </section>
       </div>
     </div>
   );

@@ -1,12 +1,12 @@
 import L from "leaflet";
-import { useEffect, useRef } from "react";
 import { Pane, useMap } from "react-leaflet";
 import type { BuildingSummary } from "../../../../server/contracts/buildings.ts";
 import { type VerdictKind, verdictKind, verdictWords } from "../../../components/plan/verdict.ts";
+import { type BoardGroup, foldBoards } from "../../../components/sheet-map/fold-boards.ts";
+import { useShield } from "../../../components/sheet-map/use-shield.ts";
+import { useSettledView } from "../../../components/sheet-map/use-view.ts";
 import { counted } from "../../../lib/format.ts";
 import { useUnits } from "../../../lib/units.ts";
-import { useSettledView } from "../base/use-view.ts";
-import { type BoardGroup, foldBoards } from "../geometry/fold-boards.ts";
 import { urgency } from "../list/house-order.ts";
 import { Board } from "./board.tsx";
 
@@ -29,11 +29,8 @@ function worstKind(items: BuildingSummary[]): VerdictKind {
 export function BoardsLayer({ buildings, chosenId, onChoose }: BoardsLayerProps) {
   const map = useMap();
   const units = useUnits();
-  const layer = useRef<HTMLDivElement>(null);
+  const layer = useShield<HTMLDivElement>();
   useSettledView();
-  useEffect(() => {
-    if (layer.current) L.DomEvent.disableClickPropagation(layer.current);
-  }, []);
   const chosen = buildings.filter((building) => building.id === chosenId);
   const others = buildings.filter((building) => building.id !== chosenId);
   const place = (building: BuildingSummary) => {

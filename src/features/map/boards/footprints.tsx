@@ -1,7 +1,7 @@
 import { Fragment } from "react";
 import { Polygon, Polyline, useMap } from "react-leaflet";
 import type { BuildingSummary } from "../../../../server/contracts/buildings.ts";
-import { useSettledView } from "../base/use-view.ts";
+import { useSettledView } from "../../../components/sheet-map/use-view.ts";
 import { corners, fromMiddle, latLng } from "../geometry/footprint.ts";
 
 /** Below this a house is smaller than a dot. */

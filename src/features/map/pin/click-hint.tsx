@@ -1,6 +1,6 @@
 import { useMap } from "react-leaflet";
+import { useSettledView } from "../../../components/sheet-map/use-view.ts";
 import { useUnits } from "../../../lib/units.ts";
-import { useSettledView } from "../base/use-view.ts";
 
 const EARTH_ROUND_M = 40_075_016.686;
 /** Nobody clicks better than this. */

@@ -6,14 +6,13 @@ import type { BuildingSummary } from "../../../../server/contracts/buildings.ts"
 import type { FarmView } from "../../../../server/contracts/farms.ts";
 import type { UnitSystem } from "../../../../server/engine/units.ts";
 import { Button } from "../../../components/button.tsx";
+import { SheetMap } from "../../../components/sheet-map/sheet-map.tsx";
 import { PHONE, useMedia } from "../../../lib/use-media.ts";
 import { usePinBuilding } from "../api/pin-building.ts";
-import { SheetMap } from "../base/sheet-map.tsx";
 import { Footprints } from "../boards/footprints.tsx";
 import { corners, type GroundPoint, latLng } from "../geometry/footprint.ts";
 import { houseFromClicks } from "../geometry/three-clicks.ts";
 import { MapControls } from "../map-controls.tsx";
-import { KeepSize } from "../map-moves.tsx";
 import { PhoneSheet } from "../phone-sheet.tsx";
 import { ClickHint } from "./click-hint.tsx";
 import { MapClicks } from "./map-clicks.tsx";
@@ -104,7 +103,6 @@ export function PinPage({ farms, buildings, cooperativeId, system }: PinPageProp
           framed={!phone}
           onMap={setMap}
         >
-          <KeepSize />
           <Footprints buildings={buildings} chosenId={null} />
           <MapClicks onClick={clicked} />
           <ClickHint

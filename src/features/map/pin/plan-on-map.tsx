@@ -1,11 +1,11 @@
-import L from "leaflet";
 import { Move } from "lucide-react";
-import { useEffect, useRef } from "react";
+import { useEffect } from "react";
 import { Pane, Polygon, Polyline, useMap } from "react-leaflet";
 import type { Position } from "../../../../server/contracts/common.ts";
+import { useShield } from "../../../components/sheet-map/use-shield.ts";
+import { useSettledView } from "../../../components/sheet-map/use-view.ts";
 import { lengthText } from "../../../lib/format.ts";
 import { useUnits } from "../../../lib/units.ts";
-import { useSettledView } from "../base/use-view.ts";
 import {
   afterRidgeDrag,
   afterSideDrag,
@@ -40,11 +40,8 @@ const size = (metres: number) => Math.min(MOST_M, Math.max(LEAST_M, metres));
 export function PlanOnMap({ position, footprint, onMove, onResize }: PlanOnMapProps) {
   const map = useMap();
   const units = useUnits();
-  const layer = useRef<HTMLDivElement>(null);
+  const layer = useShield<HTMLDivElement>();
   useSettledView();
-  useEffect(() => {
-    if (layer.current) L.DomEvent.disableClickPropagation(layer.current);
-  }, []);
   useEffect(() => {
     // Typed degrees may lie on the other side of the world; the map follows the pin.
     const point = latLng(position);

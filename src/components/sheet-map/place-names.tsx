@@ -1,7 +1,7 @@
 import { keepPreviousData, useQuery } from "@tanstack/react-query";
 import { Pane, useMap } from "react-leaflet";
-import type { PlaceView } from "../../../../server/contracts/climate.ts";
-import { placesInViewQuery, viewBox } from "../api/places.ts";
+import type { PlaceView } from "../../../server/contracts/climate.ts";
+import { placesInViewQuery, viewBox } from "../../lib/places-in-view.ts";
 import { useSettledView } from "./use-view.ts";
 
 const CHARACTER_PX = 7.6;

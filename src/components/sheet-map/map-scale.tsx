@@ -1,7 +1,7 @@
 import { useMap } from "react-leaflet";
-import { number } from "../../../lib/format.ts";
-import { useUnits } from "../../../lib/units.ts";
-import { scaleBar } from "../geometry/scale-bar.ts";
+import { number } from "../../lib/format.ts";
+import { useUnits } from "../../lib/units.ts";
+import { scaleBar } from "./scale-bar.ts";
 import { useSettledView } from "./use-view.ts";
 
 const EARTH_ROUND_M = 40_075_016.686;

@@ -1,8 +1,8 @@
 import { queryOptions } from "@tanstack/react-query";
 import type { LatLngBounds } from "leaflet";
-import type { PlaceView } from "../../../../server/contracts/climate.ts";
-import type { ListOf } from "../../../../server/contracts/common.ts";
-import { api } from "../../../lib/api-client.ts";
+import type { PlaceView } from "../../server/contracts/climate.ts";
+import type { ListOf } from "../../server/contracts/common.ts";
+import { api } from "./api-client.ts";
 
 export interface ViewBox {
   south: number;

@@ -1,4 +1,4 @@
-import { fromSi, toSi, type UnitSystem } from "../../../../server/engine/units.ts";
+import { fromSi, toSi, type UnitSystem } from "../../../server/engine/units.ts";
 
 export interface ScaleBar {
   /** Length of the whole bar on the screen. */

@@ -2,6 +2,7 @@ import "./map.css";
 import type { LatLngBoundsExpression, LatLngExpression, Map as LeafletMap } from "leaflet";
 import type { ReactNode } from "react";
 import { MapContainer } from "react-leaflet";
+import { KeepSize } from "./keep-size.tsx";
 import { MapFrame } from "./map-frame.tsx";
 import { MapScale } from "./map-scale.tsx";
 import { PlaceNames } from "./place-names.tsx";
@@ -19,13 +20,23 @@ interface SheetMapProps {
   center: LatLngExpression;
   zoom: number;
   framed?: boolean;
+  /** A small map must reach farther out to show the whole world. */
+  leastZoom?: number;
   /** Hands out the map for moves asked for outside of it. */
   onMap?: (map: LeafletMap | null) => void;
   children?: ReactNode;
 }
 
 /** A sheet of map without a tile server: outlines, grid, names and scale, all from the product's own files. */
-export function SheetMap({ label, center, zoom, framed = true, onMap, children }: SheetMapProps) {
+export function SheetMap({
+  label,
+  center,
+  zoom,
+  framed = true,
+  leastZoom = 2,
+  onMap,
+  children,
+}: SheetMapProps) {
   return (
     <section aria-label={label} className="relative isolate h-full min-h-0 w-full">
       <MapContainer
@@ -33,7 +44,7 @@ export function SheetMap({ label, center, zoom, framed = true, onMap, children }
         className="sheet-map h-full w-full"
         center={center}
         zoom={zoom}
-        minZoom={2}
+        minZoom={leastZoom}
         maxZoom={DEEPEST_ZOOM}
         maxBounds={WORLD}
         maxBoundsViscosity={1}
@@ -43,6 +54,7 @@ export function SheetMap({ label, center, zoom, framed = true, onMap, children }
         markerZoomAnimation={false}
         fadeAnimation={false}
       >
+        <KeepSize />
         <WorldLayer />
         <MapFrame framed={framed} />
         <PlaceNames />

@@ -1,5 +1,5 @@
 import { useMap } from "react-leaflet";
-import { degreeLabel, graticuleLinesDeg, graticuleStepDeg } from "../geometry/graticule.ts";
+import { degreeLabel, graticuleLinesDeg, graticuleStepDeg } from "./graticule.ts";
 import { useMovingView } from "./use-view.ts";
 
 /** Room for the degree labels outside the neat line, and the line's own thickness. */
