@@ -109,7 +109,7 @@ export function DataTable<Row, Key extends string>(props: DataTableProps<Row, Ke
               return (
                 <td
                   key={column.key}
-                  className={`px-2 py-1.5 max-md:flex max-md:items-baseline max-md:justify-between max-md:gap-4 max-md:px-0 max-md:py-0.5 ${column.align === "right" ? "text-right" : ""} ${column.deskOnly ? "max-md:hidden" : ""}`}
+                  className={`px-2 py-1.5 max-md:flex max-md:items-center max-md:justify-between max-md:gap-4 max-md:px-0 max-md:py-0.5 ${column.align === "right" ? "text-right" : ""} ${column.deskOnly ? "max-md:hidden" : ""}`}
                 >
                   <span className="text-ink-2 md:hidden" aria-hidden="true">
                     {column.unit ? `${column.header}, ${column.unit}` : column.header}

@@ -1,7 +1,7 @@
 import { LocateFixed } from "lucide-react";
 import { useEffect, useState } from "react";
 import type { Position } from "../../server/contracts/common.ts";
-import { parseDegrees } from "../lib/coordinates.ts";
+import { degreesProblem, parseDegrees, parsePair } from "../lib/coordinates.ts";
 import { Button } from "./button.tsx";
 import { TextField } from "./text-field.tsx";
 
@@ -31,9 +31,18 @@ export function PositionFields({ position, onPosition, problem }: PositionFields
   const change = (latitudeText: string, longitudeText: string) => {
     setLatitude(latitudeText);
     setLongitude(longitudeText);
+    const pasted = parsePair(latitudeText) ?? parsePair(longitudeText);
+    if (pasted !== null) {
+      setLatitude(shown(pasted.latitudeDeg));
+      setLongitude(shown(pasted.longitudeDeg));
+      return onPosition(pasted);
+    }
     const latitudeDeg = parseDegrees(latitudeText);
     const longitudeDeg = parseDegrees(longitudeText);
-    if (latitudeDeg !== null && longitudeDeg !== null) onPosition({ latitudeDeg, longitudeDeg });
+    const fits =
+      degreesProblem(latitudeText, "latitude") === null &&
+      degreesProblem(longitudeText, "longitude") === null;
+    if (fits && latitudeDeg !== null && longitudeDeg !== null) onPosition({ latitudeDeg, longitudeDeg });
   };
   const locate = () => {
     setDeviceProblem(undefined);
@@ -51,18 +60,20 @@ export function PositionFields({ position, onPosition, problem }: PositionFields
   return (
     <fieldset className="m-0 border-0 p-0">
       <legend className="sr-only">Position</legend>
-      <div className="grid grid-cols-2 gap-3">
+      <div className="grid grid-cols-2 items-start gap-3">
         <TextField
           label="Latitude"
           value={latitude}
           onValue={(text) => change(text, longitude)}
           placeholder="53.36 N"
+          problem={degreesProblem(latitude, "latitude") ?? undefined}
         />
         <TextField
           label="Longitude"
           value={longitude}
           onValue={(text) => change(latitude, text)}
           placeholder="7.48 W"
+          problem={degreesProblem(longitude, "longitude") ?? undefined}
         />
       </div>
       {problem || deviceProblem ? (

@@ -15,3 +15,36 @@ export function degreesText(value: number, axis: "latitude" | "longitude", decim
   const letters = axis === "latitude" ? ["N", "S"] : ["E", "W"];
   return `${Math.abs(value).toFixed(decimals)}° ${value < 0 ? letters[1] : letters[0]}`;
 }
+
+/** A latitude typed where −90° to 90° is possible, and a longitude −180° to 180°. */
+export function degreesProblem(text: string, axis: "latitude" | "longitude"): string | null {
+  if (text.trim() === "") return null;
+  const value = parseDegrees(text);
+  const example = axis === "latitude" ? "53.3598 or 41.2 S" : "-7.4802 or 172.6 E";
+  if (value === null) {
+    return `${axis === "latitude" ? "Latitude" : "Longitude"} must be decimal degrees, such as ${example}.`;
+  }
+  const wrongSide = axis === "latitude" ? /[EW]/i : /[NS]/i;
+  if (wrongSide.test(text)) return "Latitude and longitude may be swapped.";
+  if (axis === "latitude" && Math.abs(value) > 90) {
+    return "Latitude must lie between −90° and 90°. Latitude and longitude may be swapped.";
+  }
+  return axis === "longitude" && Math.abs(value) > 180 ? "Longitude must lie between −180° and 180°." : null;
+}
+
+/** Both numbers pasted at once, "53.36, -7.48" or "41.2 S 172.6 E"; null when it is not such a pair. */
+export function parsePair(text: string): { latitudeDeg: number; longitudeDeg: number } | null {
+  const match =
+    /^\s*([NSEW]?\s*[-−+]?\d{1,3}(?:\.\d+)?\s*°?\s*[NSEW]?)(?:\s*[,;]\s*|\s+)([NSEW]?\s*[-−+]?\d{1,3}(?:\.\d+)?\s*°?\s*[NSEW]?)\s*$/i.exec(
+      text,
+    );
+  const [first = "", second = ""] = match?.slice(1) ?? [];
+  const turned = /[EW]/i.test(first) || /[NS]/i.test(second);
+  const [latitude, longitude] = turned ? [second, first] : [first, second];
+  const latitudeDeg = parseDegrees(latitude);
+  const longitudeDeg = parseDegrees(longitude);
+  if (latitudeDeg === null || longitudeDeg === null) return null;
+  const fits =
+    degreesProblem(latitude, "latitude") === null && degreesProblem(longitude, "longitude") === null;
+  return fits ? { latitudeDeg, longitudeDeg } : null;
+}

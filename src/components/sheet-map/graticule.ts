@@ -1,10 +1,10 @@
 /** Steps between grid lines in degrees, from the whole world down to a yard. */
-const STEPS_DEG = [30, 20, 10, 5, 2, 1, 0.5, 0.2, 0.1, 0.05, 0.02, 0.01, 0.005, 0.002, 0.001, 0.0005];
+const STEPS_DEG = [90, 60, 30, 20, 10, 5, 2, 1, 0.5, 0.2, 0.1, 0.05, 0.02, 0.01, 0.005, 0.002, 0.001, 0.0005];
 
 /** The finest step whose lines stay at least `leastPx` apart. */
 export function graticuleStepDeg(pxPerDeg: number, leastPx: number): number {
   const fitting = STEPS_DEG.filter((step) => step * pxPerDeg >= leastPx);
-  return fitting.at(-1) ?? STEPS_DEG[0] ?? 30;
+  return fitting.at(-1) ?? STEPS_DEG[0] ?? 90;
 }
 
 /** Multiples of the step from `low` to `high`, both included. */

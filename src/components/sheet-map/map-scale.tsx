@@ -5,6 +5,8 @@ import { scaleBar } from "./scale-bar.ts";
 import { useSettledView } from "./use-view.ts";
 
 const EARTH_ROUND_M = 40_075_016.686;
+/** A map of whole continents has no one scale. */
+const LEAST_ZOOM = 2;
 /** A bar shorter than this has no room for its middle figure. */
 const NARROW_PX = 80;
 
@@ -13,6 +15,7 @@ export function MapScale({ mostPx, className = "" }: { mostPx: number; className
   const map = useMap();
   const { system } = useUnits();
   useSettledView();
+  if (map.getZoom() < LEAST_ZOOM) return null;
   const latitude = (map.getCenter().lat * Math.PI) / 180;
   const metresPerPx = (EARTH_ROUND_M * Math.cos(latitude)) / (256 * 2 ** map.getZoom());
   const { widthPx, ticks, unit } = scaleBar(metresPerPx, mostPx, system);

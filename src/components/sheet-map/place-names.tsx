@@ -7,6 +7,8 @@ import { useSettledView } from "./use-view.ts";
 const CHARACTER_PX = 7.6;
 const LINE_PX = 20;
 const MOST_NAMES = 28;
+/** On a map of the whole world every name is in the way of the boards. */
+const LEAST_ZOOM = 2;
 
 interface PlacedName {
   place: PlaceView;
@@ -40,10 +42,13 @@ function look(population: number): string {
 export function PlaceNames() {
   const map = useMap();
   useSettledView();
+  const enabled = map.getZoom() >= LEAST_ZOOM;
   const { data: places = [] } = useQuery({
     ...placesInViewQuery(viewBox(map.getBounds(), map.getZoom())),
     placeholderData: keepPreviousData,
+    enabled,
   });
+  if (!enabled) return null;
   const names = withoutOverlaps(
     places.map((place) => {
       const { x, y } = map.latLngToLayerPoint([place.latitudeDeg, place.longitudeDeg]);

@@ -45,6 +45,7 @@ export function SheetMap({
         center={center}
         zoom={zoom}
         minZoom={leastZoom}
+        zoomSnap={leastZoom < 2 ? 0.25 : 1}
         maxZoom={DEEPEST_ZOOM}
         maxBounds={WORLD}
         maxBoundsViscosity={1}

@@ -1,28 +1,28 @@
-import { useCallback, useRef, useSyncExternalStore } from "react";
+import { useCallback, useSyncExternalStore } from "react";
 import { useMap } from "react-leaflet";
 
 const MOVING = "move zoom viewreset resize";
 const SETTLED = "moveend zoomend viewreset resize";
 
-/** Counts the changes of the view, so that a component draws anew while the map moves or once it has settled. */
-function useViewCount(events: string): number {
+/** Draws a component anew when the view has changed. What is compared is the view itself, so no change is missed. */
+function useView(events: string): void {
   const map = useMap();
-  const count = useRef(0);
   const subscribe = useCallback(
     (changed: () => void) => {
-      const moved = () => {
-        count.current += 1;
-        changed();
-      };
-      map.on(events, moved);
+      map.on(events, changed);
       return () => {
-        map.off(events, moved);
+        map.off(events, changed);
       };
     },
     [map, events],
   );
-  return useSyncExternalStore(subscribe, () => count.current);
+  useSyncExternalStore(subscribe, () => {
+    const { lat, lng } = map.getCenter();
+    const { x, y } = map.getSize();
+    return `${lat} ${lng} ${map.getZoom()} ${x} ${y}`;
+  });
 }
 
-export const useMovingView = () => useViewCount(MOVING);
-export const useSettledView = () => useViewCount(SETTLED);
+export const useMovingView = () => useView(MOVING);
+/** For what is too heavy to be drawn while the map moves; layers move with it anyway. */
+export const useSettledView = () => useView(SETTLED);

@@ -1,153 +1,122 @@
-import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
-import { type FormEvent, useState } from "react";
+import { useQuery } from "@tanstack/react-query";
+import { X } from "lucide-react";
+import { useState } from "react";
 import type { PersonView, Role } from "../../../server/contracts/people.ts";
 import { Button } from "../../components/button.tsx";
+import { ConfirmDialog } from "../../components/confirm-dialog.tsx";
+import { type DataColumn, DataTable } from "../../components/data-table.tsx";
 import { PageState } from "../../components/page-state.tsx";
-import { Segmented } from "../../components/segmented.tsx";
-import { TextField } from "../../components/text-field.tsx";
-import { ApiError, api } from "../../lib/api-client.ts";
+import { counted } from "../../lib/format.ts";
 import { meQuery } from "../../lib/me-query.ts";
 import { peopleQuery } from "../../lib/people-query.ts";
+import { useRemoveRole } from "./api.ts";
+import { InviteForm } from "./invite-form.tsx";
+import { roleWords } from "./role-words.ts";
 
-const roleWords: Record<Role, string> = { advisor: "Adviser", farmer: "Farmer", manager: "Manager" };
-const roleOptions: { value: Role; label: string }[] = (["advisor", "farmer", "manager"] as const).map((value) => ({
-  value,
-  label: roleWords[value],
-}));
+interface Asked {
+  person: PersonView;
+  role: Role;
+}
 
-function InviteForm({ cooperativeId }: { cooperativeId: string }) {
-  const client = useQueryClient();
-  const [name, setName] = useState("");
-  const [email, setEmail] = useState("");
-  const [role, setRole] = useState<Role>("advisor");
-  const [invited, setInvited] = useState("");
-  const invite = useMutation({
-    mutationFn: () => api.post(`/api/cooperatives/${cooperativeId}/people`, { name, email, role }),
-    onSuccess: () => {
-      setInvited(name);
-      setName("");
-      setEmail("");
-      return client.invalidateQueries({ queryKey: ["cooperatives", cooperativeId, "people"] });
-    },
-  });
-  const fields = invite.error instanceof ApiError ? invite.error.fields : {};
-  const submit = (event: FormEvent) => {
-    event.preventDefault();
-    setInvited("");
-    invite.mutate();
-  };
+function Roles({ person, onAsk }: { person: PersonView; onAsk(role: Role): void }) {
   return (
-    <form onSubmit={submit} className="grid content-start gap-4" aria-label="Invite a person" noValidate>
-      <h2 className="m-0 border-b-2 border-ink pb-1 font-sign text-lg font-bold">Invite a person</h2>
-      <TextField label="Name" value={name} onValue={setName} problem={fields.name} autoComplete="off" />
-      <TextField
-        label="E-mail"
-        type="email"
-        hint="The address they sign in with."
-        value={email}
-        onValue={setEmail}
-        problem={fields.email}
-        autoComplete="off"
-      />
-      <Segmented<Role> label="Role" quietLabel={false} options={roleOptions} value={role} onChange={setRole} />
-      <Button type="submit" busy={invite.isPending} className="justify-self-start">
-        Invite
-      </Button>
-      {invite.error && Object.keys(fields).length === 0 ? (
-        <p role="alert" className="m-0 font-semibold text-redlead">
-          {invite.error.message}
-        </p>
-      ) : null}
-      <p role="status" className="m-0">
-        {invited === "" ? "" : `${invited} was added, and a letter is on its way.`}
-      </p>
-    </form>
+    <span className="flex flex-wrap gap-2 max-md:justify-end">
+      {person.roles.map((role) => (
+        <Button
+          key={role}
+          kind="plain"
+          className="text-sm"
+          aria-label={`${roleWords[role]}: take this role from ${person.name}`}
+          onClick={() => onAsk(role)}
+        >
+          {roleWords[role]}
+          <X size={16} aria-hidden="true" />
+        </Button>
+      ))}
+    </span>
   );
 }
 
-function PersonRow({ person, onRemove }: { person: PersonView; onRemove(role: Role): void }) {
+function RemoveRole({
+  asked,
+  cooperativeId,
+  onClose,
+}: {
+  asked: Asked;
+  cooperativeId: string;
+  onClose(): void;
+}) {
+  const remove = useRemoveRole(cooperativeId);
+  const { person, role } = asked;
+  const farms = role === "manager" ? [] : person.farmNames;
   return (
-    <tr className="border-b border-rule max-md:block max-md:py-2">
-      <th scope="row" className="py-2 pr-4 text-left font-normal max-md:block max-md:py-0">
-        <b>{person.name}</b>
-        <span className="block text-sm break-all text-ink-2">{person.email}</span>
-      </th>
-      <td className="py-2 pr-4 text-sm max-md:block max-md:py-0">{person.farmNames.join(", ")}</td>
-      <td className="py-2 pr-4 text-sm max-md:block max-md:py-0">
-        {person.hasSignedIn ? "has signed in" : "not yet signed in"}
-      </td>
-      <td className="py-2 max-md:block">
-        <span className="flex flex-wrap gap-2">
-          {person.roles.map((role) => (
-            <Button key={role} kind="plain" className="text-sm" onClick={() => onRemove(role)}>
-              {roleWords[role]}
-              <span className="sr-only">{`: take this role from ${person.name}`}</span>
-              <span aria-hidden="true">×</span>
-            </Button>
-          ))}
-        </span>
-      </td>
-    </tr>
+    <ConfirmDialog
+      title={`Take a role from ${person.name}?`}
+      action="Take the role away"
+      busy={remove.isPending}
+      error={remove.error}
+      onConfirm={() => remove.mutate({ personId: person.id, role }, { onSuccess: onClose })}
+      onClose={onClose}
+    >
+      <p>
+        {`${person.name} is then no longer ${roleWords[role].toLowerCase()} of this co-operative`}
+        {farms.length > 0 ? ` and no longer works on ${farms.join(", ")}` : ""}. What was written and answered
+        stays as it is.
+      </p>
+    </ConfirmDialog>
   );
 }
 
 /** Everybody of the co-operative, and how new people come in. */
 export function PeopleScreen() {
   const { data: me } = useQuery(meQuery);
-  const client = useQueryClient();
   const cooperativeId = me?.activeCooperativeId ?? "";
   const people = useQuery({ ...peopleQuery(cooperativeId), enabled: cooperativeId !== "" });
-  const remove = useMutation({
-    mutationFn: ({ person, role }: { person: PersonView; role: Role }) =>
-      api.delete<void>(`/api/cooperatives/${cooperativeId}/people/${person.id}/${role}`),
-    onSuccess: () => client.invalidateQueries({ queryKey: ["cooperatives", cooperativeId, "people"] }),
-  });
-  const ask = (person: PersonView, role: Role) => {
-    const farms =
-      person.farmNames.length > 0 && role !== "manager" ? ` and from ${person.farmNames.join(", ")}` : "";
-    const words = `Take the role "${roleWords[role]}" from ${person.name}${farms}? What was signed stays as it is.`;
-    if (window.confirm(words)) remove.mutate({ person, role });
-  };
+  const [asked, setAsked] = useState<Asked | null>(null);
   if (people.isError && people.data === undefined) {
     return <PageState kind="error" error={people.error} onRetry={() => void people.refetch()} />;
   }
   if (people.data === undefined) return <PageState kind="loading" />;
+  const columns: DataColumn<PersonView, "person" | "farms" | "seen" | "roles">[] = [
+    {
+      key: "person",
+      header: "Person",
+      names: true,
+      cell: (person) => (
+        <>
+          <b className="block text-base">{person.name}</b>
+          <span className="text-ink-2 [overflow-wrap:anywhere]">{person.email}</span>
+        </>
+      ),
+    },
+    { key: "farms", header: "Farms", cell: (person) => person.farmNames.join(", ") || "–" },
+    {
+      key: "seen",
+      header: "Signed in",
+      cell: (person) => (person.hasSignedIn ? "yes" : "not yet"),
+    },
+    {
+      key: "roles",
+      header: "Roles",
+      cell: (person) => <Roles person={person} onAsk={(role) => setAsked({ person, role })} />,
+    },
+  ];
   return (
-    <div className="mx-auto grid w-full max-w-[1180px] gap-x-12 gap-y-8 px-4 py-6 md:grid-cols-[5fr_2fr] md:px-8">
-      <h1 className="m-0 font-sign text-2xl font-extrabold md:col-span-2">People</h1>
-      <div>
-        {remove.error ? (
-          <p role="alert" className="border-l-[6px] border-redlead bg-redlead-tint p-3">
-            {remove.error instanceof ApiError
-              ? (Object.values(remove.error.fields)[0] ?? remove.error.message)
-              : remove.error.message}
-          </p>
-        ) : null}
-        <table className="w-full border-collapse">
-          <thead className="max-md:sr-only">
-            <tr className="border-b-2 border-ink text-left text-sm">
-              <th scope="col" className="py-2 font-semibold">
-                Person
-              </th>
-              <th scope="col" className="py-2 font-semibold">
-                Farms
-              </th>
-              <th scope="col" className="py-2 font-semibold">
-                Sign-in
-              </th>
-              <th scope="col" className="py-2 font-semibold">
-                Roles
-              </th>
-            </tr>
-          </thead>
-          <tbody>
-            {people.data.map((person) => (
-              <PersonRow key={person.id} person={person} onRemove={(role) => ask(person, role)} />
-            ))}
-          </tbody>
-        </table>
-      </div>
+    <div className="mx-auto grid w-full max-w-[1280px] gap-x-12 gap-y-8 px-4 py-6 md:px-8 lg:grid-cols-[minmax(0,5fr)_minmax(280px,2fr)]">
+      <h1 className="m-0 font-sign text-2xl font-extrabold lg:col-span-2">
+        {counted(people.data.length, "person", "people")}
+      </h1>
+      <DataTable
+        caption="People of the co-operative"
+        columns={columns}
+        rows={people.data}
+        rowId={(person) => person.id}
+        empty="Nobody yet."
+      />
       <InviteForm cooperativeId={cooperativeId} />
+      {asked === null ? null : (
+        <RemoveRole asked={asked} cooperativeId={cooperativeId} onClose={() => setAsked(null)} />
+      )}
     </div>
   );
 }

@@ -65,9 +65,9 @@ function Numbers({ rows, onChoose }: SitesMapProps) {
               onClick={() => (single ? onChoose(first.row.buildingId) : closer())}
             >
               <span
-                className={`flex h-8 min-w-8 items-center justify-center rounded-full border-2 px-1.5 text-sm font-bold ${looks[worst]}`}
+                className={`flex h-8 min-w-8 items-center justify-center rounded-full border-2 px-1.5 text-sm font-bold whitespace-nowrap ${looks[worst]}`}
               >
-                {single ? first.number : `${first.number} +${group.items.length - 1}`}
+                {single ? first.number : `${first.number}, +${group.items.length - 1}`}
               </span>
             </button>
           );
@@ -86,7 +86,7 @@ function FitRows({ bounds }: { bounds: string }) {
         [south, west],
         [north, east],
       ],
-      { padding: [34, 34], maxZoom: 12 },
+      { padding: [26, 26], maxZoom: 12 },
     );
   }, [bounds, map]);
   return null;

@@ -130,7 +130,7 @@ export function SitesScreen() {
             <h2 id="sites-map" className="m-0 mb-2 font-sign text-lg font-bold">
               Where they are
             </h2>
-            <div className="h-96 border border-ink">
+            <div className="h-80 border border-ink">
               <Suspense fallback={<PageState kind="loading" words="Fetching the map" />}>
                 <SitesMap rows={sorted} onChoose={show} />
               </Suspense>

@@ -25,12 +25,6 @@ function hours(row: SiteRow): string {
 
 function Name({ row, units }: { row: SiteRow; units: Units }) {
   const kind = verdictKind(row.plan);
-  const words = (
-    <>
-      <b>{row.buildingName}</b>
-      {`, ${row.farmName}`}
-    </>
-  );
   const stale = row.plan?.outdated ? "; survey changed since" : "";
   return (
     <span className="flex items-center gap-3">
@@ -42,14 +36,17 @@ function Name({ row, units }: { row: SiteRow; units: Units }) {
       />
       <span>
         {row.canOpen && row.plan !== null ? (
-          <Link to={`/buildings/${row.buildingId}/sizing`} className="text-ink">
-            {words}
+          <Link
+            to={`/buildings/${row.buildingId}/sizing`}
+            className="inline-flex items-center font-bold text-ink max-md:min-h-11"
+          >
+            {row.buildingName}
           </Link>
         ) : (
-          words
+          <b>{row.buildingName}</b>
         )}
         <span className="block text-xs text-ink-2">
-          {`${row.place}, ${row.country}; ${units.text(row.floorAreaM2, "area")}${stale}`}
+          {`${row.farmName}, ${row.country}; ${units.text(row.floorAreaM2, "area")}${stale}`}
         </span>
       </span>
     </span>
@@ -104,7 +101,7 @@ export function SitesTable({ rows, units, sort, chosenId, onSort }: SitesTablePr
     },
     {
       key: "below",
-      header: "Below set-point",
+      header: "Degrees short",
       unit: units.symbol("temperatureDifference"),
       ...right,
       cell: (row) => figure(degreesBelow(row), "temperatureDifference", 1),

@@ -2,7 +2,7 @@ import { Fragment } from "react";
 import { Polygon, Polyline, useMap } from "react-leaflet";
 import type { BuildingSummary } from "../../../../server/contracts/buildings.ts";
 import { useSettledView } from "../../../components/sheet-map/use-view.ts";
-import { corners, fromMiddle, latLng } from "../geometry/footprint.ts";
+import { corners, fromMiddle, latLng } from "../../../lib/footprint.ts";
 
 /** Below this a house is smaller than a dot. */
 const LEAST_ZOOM = 13;

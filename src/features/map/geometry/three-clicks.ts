@@ -1,4 +1,4 @@
-import { afterRidgeDrag, afterSideDrag, type Footprint, type GroundPoint } from "./footprint.ts";
+import { afterRidgeDrag, afterSideDrag, type Footprint, type GroundPoint } from "../../../lib/footprint.ts";
 
 /** A house from three clicks: one end of the ridge, the other end, and a point on a long side. */
 export function houseFromClicks([first, second, side]: [GroundPoint, GroundPoint, GroundPoint]): {

@@ -1,6 +1,6 @@
 import type { PointerEvent, ReactNode } from "react";
 import { useMap } from "react-leaflet";
-import { type GroundPoint, latLng } from "../geometry/footprint.ts";
+import { type GroundPoint, latLng } from "../../../lib/footprint.ts";
 
 interface DragHandleProps {
   at: GroundPoint;

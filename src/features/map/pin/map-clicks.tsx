@@ -1,5 +1,5 @@
 import { useMapEvents } from "react-leaflet";
-import { type GroundPoint, wrapLongitude } from "../geometry/footprint.ts";
+import { type GroundPoint, wrapLongitude } from "../../../lib/footprint.ts";
 
 /** Where the map was clicked, to the decimal a click can mean. */
 export function MapClicks({ onClick }: { onClick(point: GroundPoint): void }) {

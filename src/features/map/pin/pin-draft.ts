@@ -2,8 +2,8 @@ import type { BuildingKind, ShapeType } from "../../../../server/contracts/build
 import type { Position } from "../../../../server/contracts/common.ts";
 import type { Quantity } from "../../../../server/contracts/quantity.ts";
 import { fromSi, type UnitSystem } from "../../../../server/engine/units.ts";
+import type { Footprint } from "../../../lib/footprint.ts";
 import { quantitySi } from "../../../lib/quantity-value.ts";
-import type { Footprint } from "../geometry/footprint.ts";
 import { shapesOf } from "./typical-outlines.ts";
 
 /** A building before it is kept. Everything but the place has a usual value to start from. */

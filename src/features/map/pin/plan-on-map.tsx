@@ -4,8 +4,6 @@ import { Pane, Polygon, Polyline, useMap } from "react-leaflet";
 import type { Position } from "../../../../server/contracts/common.ts";
 import { useShield } from "../../../components/sheet-map/use-shield.ts";
 import { useSettledView } from "../../../components/sheet-map/use-view.ts";
-import { lengthText } from "../../../lib/format.ts";
-import { useUnits } from "../../../lib/units.ts";
 import {
   afterRidgeDrag,
   afterSideDrag,
@@ -15,7 +13,9 @@ import {
   type GroundPoint,
   latLng,
   wrapLongitude,
-} from "../geometry/footprint.ts";
+} from "../../../lib/footprint.ts";
+import { lengthText } from "../../../lib/format.ts";
+import { useUnits } from "../../../lib/units.ts";
 import { DragHandle } from "./drag-handle.tsx";
 
 /** Sizes that a grip may drag a house to. */

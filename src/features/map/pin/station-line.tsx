@@ -2,8 +2,8 @@ import { useQuery } from "@tanstack/react-query";
 import { Pane, Polyline, useMap } from "react-leaflet";
 import type { Position } from "../../../../server/contracts/common.ts";
 import { useSettledView } from "../../../components/sheet-map/use-view.ts";
+import { latLng } from "../../../lib/footprint.ts";
 import { nearestStationsQuery, stationQuery } from "../api/stations.ts";
-import { latLng } from "../geometry/footprint.ts";
 
 /** The weather station whose record will be used, and the way to it. */
 export function StationLine({ position }: { position: Position }) {
