@@ -16,6 +16,9 @@ export { ENGINE_VERSION } from "./version.ts";
 
 // -- air
 
+export type { DampRoom, DryLimit } from "./air/condensation.ts";
+// Inner faces: their temperature, least insulation that stays dry, highest humidity.
+export { dryHumidityFrac, dryLimit, insideFaceTempC } from "./air/condensation.ts";
 // Moist air: water, volume, heat, dew point, pressure with height.
 export {
   airDensityKgM3,
@@ -23,16 +26,21 @@ export {
   dewPointC,
   enthalpyKjKg,
   evaporationHeatKjKg,
+  exhaustEnthalpyW,
   humidityRatio,
+  humidityRatioFromDewPoint,
   humidityRatioFromPressure,
   pressureAtAltitudePa,
   relativeHumidityFrac,
   specificVolumeM3Kg,
+  sublimationHeatKjKg,
   vapourPressureFromRatioPa,
   vapourPressurePa,
 } from "./air/moist-air.ts";
 // Saturation over ice and water, and its inverse.
 export { dewPointFromPressureC, saturationPressurePa } from "./air/saturation.ts";
+// Wetted thermometer.
+export { wetBulbC } from "./air/wet-bulb.ts";
 
 // -- sun
 

@@ -4,6 +4,9 @@ declare module "psychrolib" {
     SetUnitSystem(system: number): void;
     GetHumRatioFromRelHum(tempC: number, humidity: number, pressurePa: number): number;
     GetTDewPointFromRelHum(tempC: number, humidity: number): number;
+    GetTWetBulbFromRelHum(tempC: number, humidity: number, pressurePa: number): number;
+    GetHumRatioFromTDewPoint(dewPointC: number, pressurePa: number): number;
+    GetMoistAirDensity(tempC: number, ratio: number, pressurePa: number): number;
     GetMoistAirEnthalpy(tempC: number, ratio: number): number;
     GetMoistAirVolume(tempC: number, ratio: number, pressurePa: number): number;
     GetSatVapPres(tempC: number): number;

@@ -55,6 +55,14 @@ export function humidityRatioFromPressure(vapourPa: number, pressurePa = STANDAR
   return (MASS_RATIO * vapourPa) / (pressurePa - vapourPa);
 }
 
+/**
+ * Water in the air from its dew point (frost point below 0 °C). Units °C, Pa → kg/kg. Valid −90 to 60 °C. Errors EngineInputError.
+ * Source [ASHRAE-F17] equation 36.
+ */
+export function humidityRatioFromDewPoint(dewPointTempC: number, pressurePa = STANDARD_PRESSURE_PA): number {
+  return humidityRatio(dewPointTempC, 1, pressurePa);
+}
+
 /** Vapour pressure of a humidity ratio. Units kg/kg, Pa → Pa. Errors EngineInputError. Source [ASHRAE-F17]. */
 export function vapourPressureFromRatioPa(ratio: number, pressurePa = STANDARD_PRESSURE_PA): number {
   checkPressure(pressurePa);
@@ -110,4 +118,28 @@ export function airHeatCapacityWhM3K(tempC: number, ratio = 0, pressurePa = STAN
 export function evaporationHeatKjKg(tempC: number): number {
   requireInRange("tempC", tempC, -40, 100, "°C");
   return 2501 - 2.361 * tempC;
+}
+
+/** Heat that leaves ice as vapour. Units °C → kJ/kg. Valid −60 to 0 °C. Errors EngineInputError. Source [ASHRAE-F17], linear fit. */
+export function sublimationHeatKjKg(tempC: number): number {
+  requireInRange("tempC", tempC, -60, 0, "°C");
+  return 2830 - 0.24 * tempC;
+}
+
+/**
+ * Whole heat carried off by exhaust air that came in as outdoor air: what warms it and the water it takes along.
+ *
+ * Units m³/h at inside conditions, kg/kg, °C, Pa → W. Negative where outdoor air brings heat. Errors EngineInputError.
+ * Source [ASHRAE-F17], difference of enthalpies per kilogram of dry air.
+ */
+export function exhaustEnthalpyW(
+  flowM3H: number,
+  inside: { tempC: number; ratio: number },
+  outdoor: { tempC: number; ratio: number },
+  pressurePa = STANDARD_PRESSURE_PA,
+): number {
+  requireInRange("flowM3H", flowM3H, 0, 1e8, "m³/h");
+  const dryAirKgH = flowM3H / specificVolumeM3Kg(inside.tempC, inside.ratio, pressurePa);
+  const gainKjKg = enthalpyKjKg(inside.tempC, inside.ratio) - enthalpyKjKg(outdoor.tempC, outdoor.ratio);
+  return (dryAirKgH * gainKjKg) / 3.6;
 }

@@ -6,4 +6,10 @@ export const airSources = {
     part: "chapter 1, psychrometrics",
     read: "from memory",
   },
+  "EN-13788": {
+    author: "CEN / ISO",
+    year: 2012,
+    title: "EN ISO 13788 Hygrothermal performance of building components, inner surface temperature",
+    read: "from memory",
+  },
 } as const;
