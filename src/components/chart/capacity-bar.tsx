@@ -69,7 +69,7 @@ export function CapacityBar({ parts, needShare, sentence, shortWords, height = 3
       />
       {shortWords ? (
         <span
-          className="absolute inset-y-0 my-auto h-fit bg-sheet px-1 text-sm leading-tight font-bold text-redlead md:whitespace-nowrap"
+          className={`absolute inset-y-0 my-auto h-fit px-1 text-sm leading-tight font-bold text-redlead md:whitespace-nowrap ${needShare < 0.72 ? "" : "bg-sheet"}`}
           style={
             needShare < 0.72
               ? { left: `calc(${at(needShare)} + 6px)`, maxWidth: `calc(${at(1 - needShare)} - 6px)` }

@@ -39,8 +39,9 @@ export function BuildingHead({ building, units, status, action, actionAtFoot = f
         : "not yet",
     },
   ];
+  const foot = actionAtFoot || !action;
   return (
-    <header className="bg-sheet print:hidden">
+    <header className="relative bg-sheet print:hidden">
       <div className="flex min-h-[72px] items-stretch border-b border-rule-strong max-md:min-h-15">
         <Link
           to={`/farms/${building.farmId}`}
@@ -49,7 +50,9 @@ export function BuildingHead({ building, units, status, action, actionAtFoot = f
         >
           <ArrowLeft aria-hidden="true" />
         </Link>
-        <div className="flex min-w-0 flex-1 items-center gap-4 py-2 md:px-4">
+        <div
+          className={`flex min-w-0 flex-1 items-center gap-4 py-2 md:px-4 ${status ? "max-md:pr-44" : ""}`}
+        >
           <span className="max-md:hidden">
             <BuildingOutline
               shapeType={building.shapeType}
@@ -68,9 +71,6 @@ export function BuildingHead({ building, units, status, action, actionAtFoot = f
             </p>
           </div>
         </div>
-        {status ? (
-          <div className="max-w-[46%] self-center pr-4 text-sm text-ink-2 md:hidden">{status}</div>
-        ) : null}
         <dl className="m-0 flex max-lg:hidden">
           {cells.map((cell) => (
             <div key={cell.name} className="flex flex-col justify-center border-l border-rule px-5">
@@ -95,10 +95,14 @@ export function BuildingHead({ building, units, status, action, actionAtFoot = f
           ))}
         </nav>
         <div
-          className={`ml-auto flex flex-wrap items-center gap-3 px-4 py-0.5 ${actionAtFoot || !action ? "max-md:hidden" : "max-md:w-full max-md:py-2"}`}
+          className={`ml-auto flex flex-wrap items-center gap-3 md:px-4 md:py-0.5 ${foot ? "" : "max-md:w-full max-md:px-4 max-md:py-2"}`}
         >
-          {status ? <div className="text-sm text-ink-2 max-md:hidden">{status}</div> : null}
-          {action}
+          {status ? (
+            <div className="text-sm text-ink-2 max-md:absolute max-md:top-0 max-md:right-4 max-md:flex max-md:h-15 max-md:max-w-40 max-md:items-center">
+              {status}
+            </div>
+          ) : null}
+          {action ? <div className={actionAtFoot ? "max-md:hidden" : ""}>{action}</div> : null}
         </div>
       </div>
     </header>

@@ -32,11 +32,11 @@ export function HaveAndSuggest({ plan, advisor, units }: { plan: PlanView; advis
   const needLeft = `${((needW / scaleW) * 100).toFixed(1)}%`;
   return (
     <section aria-label="Heaters against the coldest night" className="max-w-[820px]">
-      <p className="m-0 font-bold">What you have</p>
+      <p className="m-0 font-bold">{`What you have: ${units.heat(have.totalW)}`}</p>
       <OptionBar option={have} needW={needW} scaleW={scaleW} units={units} height={40} />
       {proposed ? (
         <>
-          <p className="m-0 mt-3 font-bold">{`What ${advisor} suggests`}</p>
+          <p className="m-0 mt-3 font-bold">{`What ${advisor} suggests: ${units.heat(proposed.totalW)}`}</p>
           <OptionBar option={proposed} needW={needW} scaleW={scaleW} units={units} height={40} />
         </>
       ) : null}

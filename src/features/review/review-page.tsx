@@ -1,6 +1,6 @@
 import { useQuery } from "@tanstack/react-query";
 import { ArrowLeft, Mail, Printer } from "lucide-react";
-import { useCallback, useState } from "react";
+import { Fragment, useCallback, useState } from "react";
 import { Link } from "react-router-dom";
 import type { PlanView } from "../../../server/contracts/plans.ts";
 import { FootBar } from "../../components/foot-bar.tsx";
@@ -42,6 +42,8 @@ export function ReviewPage({ plan }: { plan: PlanView }) {
   const coldest = plan.result.months.find((month) => month.month === plan.result.sizing.onceInYearsMonth);
   const holds = plan.result.sizing.verdictOnceInYears === "holds";
   const changes = changesForYou(plan, units);
+  // Once answered, the answer is something to read and no longer the thing to do.
+  const AnswerPlace = plan.status === "sent" || plan.status === "asked" ? FootBar : Fragment;
   return (
     <>
       <HatchSheet />
@@ -101,12 +103,12 @@ export function ReviewPage({ plan }: { plan: PlanView }) {
           </article>
           <aside aria-label="Answer" className="border-ink bg-sheet px-7 py-6 max-lg:px-4 lg:border-l-2">
             {plan.can.answer || plan.answeredAt ? (
-              <FootBar>
+              <AnswerPlace>
                 <h2 className="m-0 mb-2 font-sign text-lg font-bold max-md:sr-only">
                   {plan.can.answer ? "Your answer" : "The farmer's answer"}
                 </h2>
                 <AnswerBox plan={plan} question={question} onQuestionTaken={questionTaken} />
-              </FootBar>
+              </AnswerPlace>
             ) : (
               <p className="m-0">{`${statusWords[plan.status]}. Only the farmer can answer.`}</p>
             )}

@@ -1,6 +1,7 @@
 import type { HouseBalance, PlanAssumption, PlanResult } from "../../../../server/engine/plan/plan-types.ts";
 import type { HeatPath } from "../../../components/section-drawing/heat-paths.ts";
 import type { Units } from "../../../lib/units.ts";
+import { togetherByRoofSide } from "./roof-sides.ts";
 
 /** A number opened to its parts: how it is worked out in words, and what went in. */
 export interface Why {
@@ -25,7 +26,7 @@ export function whyFlow(path: HeatPath, balance: HouseBalance, units: Units): Wh
   const inside = { name: "Inside air", value: units.temperature(balance.insideTempC) };
   const outside = { name: "Outside air", value: units.temperature(balance.outdoorTempC) };
   const step = { name: "Difference", value: units.text(difference, "temperatureDifference") };
-  const surfaces = balance.surfaces.map((surface) => ({
+  const surfaces = togetherByRoofSide(balance.surfaces).map((surface) => ({
     name: surface.label,
     value: `${units.text(surface.areaM2, "area")}, ${units.text(surface.uValueWM2K, "uValue")}`,
   }));
@@ -47,7 +48,7 @@ export function whyFlow(path: HeatPath, balance: HouseBalance, units: Units): Wh
         parts: [
           { name: "Sky", value: units.temperature(balance.skyTempC) },
           outside,
-          ...balance.surfaces
+          ...togetherByRoofSide(balance.surfaces)
             .filter((surface) => surface.toSkyW > 0)
             .map((surface) => ({ name: surface.label, value: units.text(surface.toSkyW, "power") })),
         ],
