@@ -1,6 +1,6 @@
 import { useQuery } from "@tanstack/react-query";
 import { ArrowLeft, Mail, Printer } from "lucide-react";
-import { Fragment, useCallback, useState } from "react";
+import { Fragment, lazy, Suspense, useCallback, useState } from "react";
 import { Link } from "react-router-dom";
 import type { PlanView } from "../../../server/contracts/plans.ts";
 import { FootBar } from "../../components/foot-bar.tsx";
@@ -17,8 +17,11 @@ import { Granted } from "./granted.tsx";
 import { HaveAndSuggest } from "./have-and-suggest.tsx";
 import { NightSentence } from "./night-sentence.tsx";
 import { changesForYou, managementSentences, notIncluded, statusWords } from "./plain-words.ts";
-import { PrintSheet } from "./print-sheet.tsx";
 import { Talk } from "./talk.tsx";
+
+/** Paper brings the charts along; they come after the page so that a phone need not wait for them. */
+const loadPrintSheet = () => import("./print-sheet.tsx");
+const PrintSheet = lazy(() => loadPrintSheet().then((module) => ({ default: module.PrintSheet })));
 
 function Outdated({ plan }: { plan: PlanView }) {
   if (!plan.outdated) return null;
@@ -128,7 +131,7 @@ export function ReviewPage({ plan }: { plan: PlanView }) {
             <p className="m-0 mt-4 grid gap-1">
               <button
                 type="button"
-                onClick={() => window.print()}
+                onClick={() => void loadPrintSheet().then(() => window.print())}
                 className="inline-flex min-h-11 items-center gap-2 justify-self-start font-semibold text-bottle underline underline-offset-4 hover:text-bottle-deep"
               >
                 <Printer size={20} aria-hidden="true" />
@@ -145,7 +148,9 @@ export function ReviewPage({ plan }: { plan: PlanView }) {
           </aside>
         </div>
       </div>
-      <PrintSheet plan={plan} library={library.data} units={units} />
+      <Suspense fallback={null}>
+        <PrintSheet plan={plan} library={library.data} units={units} />
+      </Suspense>
     </>
   );
 }

@@ -1,5 +1,5 @@
 import { useController, useFormContext, useWatch } from "react-hook-form";
-import { shapeTypes } from "../../../../server/contracts/buildings.ts";
+import type { ShapeType } from "../../../../server/contracts/buildings.ts";
 import type { Survey, SurveyShape } from "../../../../server/contracts/survey.ts";
 import { ChoiceButtons } from "../../../components/form/choice-buttons.tsx";
 import { shapeNames } from "../../../components/plan/shape-names.ts";
@@ -72,7 +72,7 @@ export function ShapeSection() {
           value={shape.type}
           disabled={disabled}
           onChange={change}
-          options={shapeTypes.map((type) => ({
+          options={(Object.keys(shapeNames) as ShapeType[]).map((type) => ({
             value: type,
             label: shapeNames[type],
             picture: <ShapePicture type={type} />,
