@@ -3,6 +3,7 @@ import type { FeatureCollection, MultiLineString, Position } from "geojson";
 import { feature, mesh } from "topojson-client";
 import type { GeometryCollection, Topology } from "topojson-specification";
 import atlasUrl from "world-atlas/countries-50m.json?url";
+import { drawnOnBothSides } from "./date-line.ts";
 
 type Atlas = Topology<{ countries: GeometryCollection; land: GeometryCollection }>;
 
@@ -40,7 +41,7 @@ async function loadOutline({ signal }: { signal: AbortSignal }): Promise<WorldOu
   const atlas = (await response.json()) as Atlas;
   const { countries, land } = atlas.objects;
   return {
-    land: feature(atlas, land),
+    land: drawnOnBothSides(feature(atlas, land)),
     coast: withoutSeams(mesh(atlas, countries, (a, b) => a === b)),
     borders: mesh(atlas, countries, (a, b) => a !== b),
   };

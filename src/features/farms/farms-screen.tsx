@@ -1,44 +1,22 @@
 import { useQuery } from "@tanstack/react-query";
 import { useState } from "react";
-import { Link, Navigate, useNavigate } from "react-router-dom";
-import type { FarmView } from "../../../server/contracts/farms.ts";
+import { Navigate, useNavigate } from "react-router-dom";
 import { Button } from "../../components/button.tsx";
 import { NewFarmForm } from "../../components/new-farm-form.tsx";
 import { PageState } from "../../components/page-state.tsx";
-import { farmsQuery } from "../../lib/farms-query.ts";
+import { buildingsQuery, farmsQuery } from "../../lib/farms-query.ts";
 import { counted } from "../../lib/format.ts";
 import { meQuery } from "../../lib/me-query.ts";
-
-function FarmLine({ farm }: { farm: FarmView }) {
-  const named = (role: "advisor" | "farmer") =>
-    farm.people
-      .filter((person) => person.role === role)
-      .map((person) => person.name)
-      .join(", ");
-  return (
-    <li className="border-b border-rule">
-      <Link
-        to={`/farms/${farm.id}`}
-        className="grid min-h-14 items-center gap-x-6 bg-sheet px-4 py-2 text-ink no-underline hover:bg-trough md:grid-cols-[2fr_1fr_2fr]"
-      >
-        <span>
-          <b className="block font-sign text-lg">{farm.name}</b>
-          <span className="block text-sm text-ink-2">{farm.place}</span>
-        </span>
-        <span>{counted(farm.buildingCount, "building")}</span>
-        <span className="text-sm text-ink-2">
-          {`${named("farmer") || "no farmer yet"}; advised by ${named("advisor") || "nobody yet"}`}
-        </span>
-      </Link>
-    </li>
-  );
-}
+import { useUnits } from "../../lib/units.ts";
+import { FarmLine } from "./farm-line.tsx";
 
 /** Farms the person may see. A farmer with one farm goes straight to it. */
 export function FarmsScreen() {
   const navigate = useNavigate();
   const { data: me } = useQuery(meQuery);
   const farms = useQuery(farmsQuery);
+  const buildings = useQuery(buildingsQuery);
+  const units = useUnits();
   const [adding, setAdding] = useState(false);
   if (farms.isError && farms.data === undefined) {
     return <PageState kind="error" error={farms.error} onRetry={() => void farms.refetch()} />;
@@ -75,7 +53,12 @@ export function FarmsScreen() {
       ) : null}
       <ul className="m-0 list-none p-0">
         {farms.data.map((farm) => (
-          <FarmLine key={farm.id} farm={farm} />
+          <FarmLine
+            key={farm.id}
+            farm={farm}
+            buildings={(buildings.data ?? []).filter((building) => building.farmId === farm.id)}
+            units={units}
+          />
         ))}
       </ul>
     </div>

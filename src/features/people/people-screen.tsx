@@ -85,7 +85,7 @@ export function PeopleScreen() {
       cell: (person) => (
         <>
           <b className="block text-base">{person.name}</b>
-          <span className="text-ink-2 [overflow-wrap:anywhere]">{person.email}</span>
+          <span className="text-ink-2 [overflow-wrap:anywhere] md:whitespace-nowrap">{person.email}</span>
         </>
       ),
     },

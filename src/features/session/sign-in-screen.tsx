@@ -50,14 +50,16 @@ export function SignInScreen() {
   const to = search.get("to") ?? "/";
   return (
     <main className="grid min-h-dvh md:grid-cols-[3fr_2fr]">
-      <section className="flex flex-col justify-end bg-[#0f1718] px-6 py-8 text-[#eaf1ee] max-md:order-2 md:p-14">
-        <p className="m-0 max-w-[24ch] font-sign text-3xl font-extrabold max-md:text-xl">
+      <section className="relative isolate overflow-hidden bg-[#0f1718] px-6 py-8 text-[#eaf1ee] max-md:order-2 max-md:min-h-110 md:p-14">
+        <div className="absolute inset-0 -z-10">
+          <ColdNight />
+        </div>
+        <p className="m-0 max-w-[17ch] font-sign text-3xl font-extrabold max-md:text-2xl">
           Which house holds on the coldest night?
         </p>
-        <p className="mb-8 max-w-[48ch] text-[#b3c1bc]">
+        <p className="m-0 mt-4 max-w-[44ch] text-[#b3c1bc]">
           Where the heat goes, month by month. What it takes to keep it. What happens when a heater stops.
         </p>
-        <ColdNight />
       </section>
       <section className="flex flex-col justify-center gap-5 bg-sheet px-6 py-10 md:px-12">
         <Wordmark heightPx={48} />

@@ -23,14 +23,16 @@ export function StationCard({ position }: { position: Position | null }) {
     );
   }
   if (best === undefined) return <p className="m-0 text-sm text-ink-2">Looking for the nearest station</p>;
+  const known = (tempC: number | null | undefined) =>
+    tempC === null || tempC === undefined ? null : units.temperature(tempC);
   const facts = [
     { name: "Away", value: units.text(best.distanceKm * 1000, "distance") },
     {
       name: "Height",
       value: best.elevationM === null ? "not known" : units.text(best.elevationM, "length", { decimals: 0 }),
     },
-    { name: "Ordinary cold night", value: units.temperature(station.data?.designColdest996C) },
-    { name: "Coldest of a mean year", value: units.temperature(station.data?.meanYearlyColdestC) },
+    { name: "Ordinary cold night", value: known(station.data?.designColdest996C) },
+    { name: "Coldest of a mean year", value: known(station.data?.meanYearlyColdestC) },
   ];
   return (
     <div className="border-[1.5px] border-rule-strong bg-sheet p-3">
