@@ -142,15 +142,38 @@ export { wetInside } from "./envelope/wet-cover.ts";
 
 // -- livestock
 
-export type { AnimalClass, AnimalState, SplitGroup } from "./livestock/animal-classes.ts";
+export type { ActivityPattern } from "./livestock/activity.ts";
+// Heat through the day by class, and of hens by their lamps.
+export { activityPattern, hourlyActivity, lampActivityRatio } from "./livestock/activity.ts";
+export type { AnimalClass, AnimalState, ClassTrust, SplitGroup } from "./livestock/animal-classes.ts";
 // Total heat of an animal by class.
-export { animalClasses, massRangeKg, splitGroup, totalHeatAt20W } from "./livestock/animal-classes.ts";
-export type { StockHeat } from "./livestock/animal-heat.ts";
+export {
+  animalClasses,
+  classTrust,
+  massRangeKg,
+  splitGroup,
+  totalHeatAt20W,
+} from "./livestock/animal-classes.ts";
+export type { StockHeat, StockHeatInput } from "./livestock/animal-heat.ts";
 // Heat, water and carbon dioxide of a herd or flock.
 export { animalHeat, CARBON_DIOXIDE_M3H_PER_KW } from "./livestock/animal-heat.ts";
+export type { CarbonDioxideSource, HeatRule } from "./livestock/heat-rules.ts";
+// Three published rules for the split, and carbon dioxide by what is counted.
+export {
+  carbonDioxideRates,
+  heatRules,
+  sensibleShare1984,
+  totalFactor1984,
+  unitHeatBy,
+} from "./livestock/heat-rules.ts";
+export type { UnitHeat } from "./livestock/house-split.ts";
 // Split into air and water, activity through the day.
 export { activityRatio, unitHeat } from "./livestock/house-split.ts";
-export type { MinimumVentilation, VentilationRule } from "./livestock/minimum-ventilation.ts";
+export type {
+  MinimumVentilation,
+  MinimumVentilationInput,
+  VentilationRule,
+} from "./livestock/minimum-ventilation.ts";
 // Least ventilation, leaks, heat recovery, balance temperature.
 export {
   balanceTempC,

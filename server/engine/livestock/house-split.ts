@@ -1,5 +1,5 @@
 import { requireInRange } from "../errors.ts";
-import type { SplitGroup } from "./animal-classes.ts";
+import type { SplitGroup } from "./animal-types.ts";
 
 /** What 1000 W of heat at 20 °C become at another temperature, W. */
 export interface UnitHeat {

@@ -20,4 +20,32 @@ export const livestockSources = {
     part: "3000 ppm carbon dioxide, 70 % humidity",
     read: "read",
   },
+  CIGR1984: {
+    author: "CIGR, working group on climatization of animal houses",
+    year: 1984,
+    title: "Report of the working group on climatization of animal houses",
+    part: "temperature correction and sensible share common to all animals",
+    read: "from memory",
+  },
+  VERA2018: {
+    author: "VERA secretariat",
+    year: 2018,
+    title: "Test protocol for livestock housing, version 3, annex H",
+    part: "carbon dioxide of dairy houses by floor",
+    read: "from memory",
+  },
+  BROWNBRANDL2014: {
+    author: "Brown-Brandl, T. M. et al.",
+    year: 2014,
+    title: "Heat and moisture production of modern swine, USDA ARS",
+    part: "about 16 % above older tables",
+    read: "read",
+  },
+  OLIVEIRA2020: {
+    author: "Oliveira, J. L. et al.",
+    year: 2020,
+    title: "Heat and moisture of hens in aviaries; heat in light and dark",
+    part: "8.5 W/kg in the light, 5.1 W/kg in the dark, quoted second-hand",
+    read: "from memory",
+  },
 } as const;

@@ -3,7 +3,7 @@ import type { MonthResult } from "./plan-types.ts";
 import type { HeaterUnit } from "./sizing-types.ts";
 
 /** Animals that are kept without heat. Source [COLDHOUSED]. */
-const COLD_HOUSED = ["calf", "beef", "heifer", "dairyCow", "ewe", "horse"];
+const COLD_HOUSED = ["calf", "beef", "heifer", "dairyCow", "ewe", "goatDry", "goatMilking", "horse"];
 
 /** Whether a house holds animals that are kept without heat. Shape: model → boolean. Source [COLDHOUSED]. */
 export function isColdHoused(model: HouseModel): boolean {

@@ -12,13 +12,21 @@ const WANTED_C: Record<AnimalClass, readonly [number, number]> = {
   piglet: [18, 36],
   fatteningPig: [8, 28],
   drySow: [8, 26],
+  gilt: [8, 26],
+  boar: [8, 26],
   nursingSow: [14, 28],
   broiler: [16, 36],
   layerCage: [10, 27],
   layerFloor: [10, 27],
   turkey: [12, 38],
+  duck: [8, 36],
+  goose: [5, 36],
   horse: [-15, 20],
   ewe: [-15, 20],
+  lamb: [-10, 25],
+  goatDry: [-10, 20],
+  goatMilking: [-5, 20],
+  rabbit: [5, 25],
 };
 /** Young birds are this small while a house is this warm. Source [CONFUSIONS]. */
 const BROODING_FROM_C = 29;
