@@ -17,11 +17,12 @@ interface CapacityBarProps {
   /** Words over the missing part, such as "short 19 kW". */
   shortWords?: string;
   height?: number;
+  /** About how wide the bar is on a desk, for words that must fit their part. */
+  widePx?: number;
 }
 
-/** About how wide a bar is on a phone and on a desk. */
+/** About how wide a bar is on a phone. */
 const NARROW_PX = 300;
-const WIDE_PX = 420;
 const LETTER_PX = 8.2;
 
 function wordsFit(part: CapacityPart, barPx: number): boolean {
@@ -29,7 +30,14 @@ function wordsFit(part: CapacityPart, barPx: number): boolean {
 }
 
 /** Heaters end to end at one scale, with the need as an upright line and the missing part hatched. */
-export function CapacityBar({ parts, needShare, sentence, shortWords, height = 30 }: CapacityBarProps) {
+export function CapacityBar({
+  parts,
+  needShare,
+  sentence,
+  shortWords,
+  height = 30,
+  widePx = 390,
+}: CapacityBarProps) {
   const total = parts.reduce((sum, part) => sum + part.share, 0);
   const missing = Math.max(0, needShare - total);
   const at = (share: number) => `${(share * 100).toFixed(2)}%`;
@@ -41,7 +49,7 @@ export function CapacityBar({ parts, needShare, sentence, shortWords, height = 3
           style={{ width: at(part.share) }}
           className={`flex items-center overflow-hidden border-[1.5px] border-ink px-2 text-sm font-bold whitespace-nowrap not-first:border-l-0 ${part.fresh ? "bg-bottle-tint" : "bg-trough"}`}
         >
-          {wordsFit(part, NARROW_PX) || wordsFit(part, WIDE_PX) ? (
+          {wordsFit(part, NARROW_PX) || wordsFit(part, widePx) ? (
             <span
               className={`relative z-1 bg-inherit px-0.5 ${wordsFit(part, NARROW_PX) ? "" : "max-md:hidden"}`}
             >

@@ -34,6 +34,9 @@ interface NeedStepsProps {
   width?: number;
 }
 
+const LETTER_PX = 7.6;
+const NARROW_MONTH_PX = 22;
+
 const words = { fill: "var(--color-ink)", fontSize: 13, fontWeight: 650 };
 
 /** Place of the month in the middle of those that ask for least. */
@@ -61,8 +64,9 @@ export function NeedStepsChart(props: NeedStepsProps) {
   const worst = onceInYears.indexOf(Math.max(...onceInYears));
   const worstShort = withShort ? (onceInYears[worst] ?? 0) - installed : 0;
   const decimals = top < 20 ? 1 : 0;
-  // Three digits a month do not fit a phone; every second one does, the worst among them.
-  const crowded = top >= 100;
+  // Long numbers do not fit the narrow months of a phone or a printed sheet; every second one does, the worst among them.
+  const longest = Math.max(...onceInYears.map((need) => number(need, decimals).length));
+  const crowded = longest * LETTER_PX > NARROW_MONTH_PX;
   // The month that asks for least leaves the most room for words.
   const wordsAt = (lowestMonth(onceInYears) + 0.5) / 12;
   const chart = (
@@ -171,7 +175,12 @@ export function NeedStepsChart(props: NeedStepsProps) {
           label={{
             value: need > 0 ? number(need, decimals) : "\u2013",
             position: "top",
-            className: crowded && (month - worst) % 2 !== 0 ? "max-sm:hidden" : undefined,
+            className:
+              crowded && (month - worst) % 2 !== 0
+                ? width === undefined
+                  ? "max-sm:hidden"
+                  : "hidden"
+                : undefined,
             ...words,
           }}
         />

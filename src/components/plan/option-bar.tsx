@@ -9,6 +9,7 @@ interface OptionBarProps {
   scaleW: number;
   units: Units;
   height?: number;
+  widePx?: number;
 }
 
 const NEED_AT_MOST = 0.66;
@@ -22,7 +23,7 @@ export function optionScaleW(options: Pick<HeaterOption, "totalW">[], needW: num
 }
 
 /** The heaters of one option end to end, against the need. */
-export function OptionBar({ option, needW, scaleW, units, height }: OptionBarProps) {
+export function OptionBar({ option, needW, scaleW, units, height, widePx }: OptionBarProps) {
   const parts = option.units.flatMap((unit, row) =>
     Array.from({ length: Math.min(unit.count, 40) }, (_, i) => ({
       key: `${row}-${i}`,
@@ -39,6 +40,7 @@ export function OptionBar({ option, needW, scaleW, units, height }: OptionBarPro
       parts={parts}
       needShare={needW / scaleW}
       height={height}
+      widePx={widePx}
       shortWords={missing > 0 ? `short ${units.heat(missing)}` : undefined}
       sentence={`${option.title}: ${units.heat(option.totalW)} in all against ${units.heat(needW)} needed, ${verdict}.`}
     />

@@ -1,3 +1,4 @@
+import "./hatches.css";
 import { type HeatPath, heatPaths } from "./heat-paths.ts";
 
 /** Fill of a path in any SVG of a page that also shows a {@link HatchSheet}. */

@@ -33,11 +33,11 @@ export function HaveAndSuggest({ plan, advisor, units }: { plan: PlanView; advis
   return (
     <section aria-label="Heaters against the coldest night" className="max-w-[820px]">
       <p className="m-0 font-bold">{`What you have: ${units.heat(have.totalW)}`}</p>
-      <OptionBar option={have} needW={needW} scaleW={scaleW} units={units} height={40} />
+      <OptionBar option={have} needW={needW} scaleW={scaleW} units={units} height={40} widePx={760} />
       {proposed ? (
         <>
           <p className="m-0 mt-3 font-bold">{`What ${advisor} suggests: ${units.heat(proposed.totalW)}`}</p>
-          <OptionBar option={proposed} needW={needW} scaleW={scaleW} units={units} height={40} />
+          <OptionBar option={proposed} needW={needW} scaleW={scaleW} units={units} height={40} widePx={760} />
         </>
       ) : null}
       <p className="relative m-0 h-7 text-sm font-bold">

@@ -33,7 +33,8 @@ export function PrintSheet({ plan, library, units }: PrintSheetProps) {
   const words = headline(plan.building.name, result, units);
   const proposed = result.sizing.options.find((option) => option.id === plan.proposedOptionId);
   const flows = balance && flowsOf(balance);
-  const power = (heatW: number) => units.figure(heatW, "power", { decimals: 1 });
+  const decimals = units.amount(Math.max(0, ...Object.values(flows ?? {})), "power") >= 1000 ? 0 : 1;
+  const power = (heatW: number) => units.figure(heatW, "power", { decimals });
   const missingW = Math.max(0, result.sizing.onceInYearsRequiredW - result.sizing.installedW);
   const cells = [
     {
