@@ -15,17 +15,20 @@ function Houses({ buildings, units }: { buildings: BuildingSummary[]; units: Uni
       {buildings.slice(0, MOST_DRAWN).map((building) => {
         const kind = verdictKind(building.plan);
         return (
-          <li key={building.id} className="relative pr-3">
+          <li key={building.id} className="relative min-w-16">
             <BuildingOutline
               shapeType={building.shapeType}
               outline={building.outline}
               size={{ width: 52, height: 32 }}
               status={kind === "unfinished" ? "unfinished" : "holds"}
             />
-            <span className="absolute -top-2 -right-1">
+            <span className="absolute -top-2 left-12">
               <VerdictMark kind={kind} size={18} />
             </span>
-            <span className="sr-only">{`${building.name}: ${verdictWords(building.plan, units)}`}</span>
+            <span className="block max-w-26 truncate text-xs text-ink-2">
+              {building.name}
+              <span className="sr-only">{`: ${verdictWords(building.plan, units)}`}</span>
+            </span>
           </li>
         );
       })}

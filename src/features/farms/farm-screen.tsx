@@ -38,34 +38,36 @@ export function FarmScreen() {
         ) : null}
         {changing ? <ChangeFarm farm={farm.data} onClose={() => setChanging(false)} /> : null}
       </div>
-      <section aria-labelledby="farm-buildings">
-        <div className="flex flex-wrap items-center justify-between gap-3 border-b-2 border-ink pb-2">
-          <h2 id="farm-buildings" className="m-0 font-sign text-lg font-bold">
-            Buildings
-          </h2>
-          {farm.data.can.addBuilding ? (
-            <Link to={`/map/new?farm=${farmId}`} className={buttonLook("quiet")}>
-              Pin a building
-            </Link>
-          ) : null}
-        </div>
-        <ul className="m-0 list-none p-0">
-          {own.map((building) => (
-            <BuildingLine
-              key={building.id}
-              building={building}
-              units={units}
-              mayChange={farm.data.can.update}
-            />
-          ))}
-        </ul>
-        {farm.data.buildingCount === 0 ? <p>No buildings yet. Stand by one and pin it.</p> : null}
-        {buildings.data && hidden > 0 ? (
-          <p className="text-ink-2">{`${hidden} not shared with the co-operative. Compare sites shows whether they hold.`}</p>
-        ) : null}
-      </section>
       <div className="grid content-start gap-8">
+        <section aria-labelledby="farm-buildings">
+          <div className="flex flex-wrap items-center justify-between gap-3 border-b-2 border-ink pb-2">
+            <h2 id="farm-buildings" className="m-0 font-sign text-lg font-bold">
+              Buildings
+            </h2>
+            {farm.data.can.addBuilding ? (
+              <Link to={`/map/new?farm=${farmId}`} className={buttonLook("quiet")}>
+                Pin a building
+              </Link>
+            ) : null}
+          </div>
+          <ul className="m-0 list-none p-0">
+            {own.map((building) => (
+              <BuildingLine
+                key={building.id}
+                building={building}
+                units={units}
+                mayChange={farm.data.can.update}
+              />
+            ))}
+          </ul>
+          {farm.data.buildingCount === 0 ? <p>No buildings yet. Stand by one and pin it.</p> : null}
+          {buildings.data && hidden > 0 ? (
+            <p className="text-ink-2">{`${hidden} not shared with the co-operative. Compare sites shows whether they hold.`}</p>
+          ) : null}
+        </section>
         <YardPlan buildings={own} units={units} />
+      </div>
+      <div className="grid content-start gap-8">
         <FarmPeople farm={farm.data} />
         <Sharing farm={farm.data} />
       </div>

@@ -5,10 +5,12 @@ import { scaleBar } from "../../components/sheet-map/scale-bar.ts";
 import { corners, eastNorthM, fromMiddle, type GroundPoint } from "../../lib/footprint.ts";
 import { number } from "../../lib/format.ts";
 import type { Units } from "../../lib/units.ts";
+import { PHONE, useMedia } from "../../lib/use-media.ts";
 
-const WIDTH_PX = 620;
-const HEIGHT_PX = 330;
-const EDGE_PX = 46;
+/** Drawn at the size it is shown in, so that its words keep theirs. */
+const DESK = { width: 620, height: 330 };
+const HAND = { width: 356, height: 230 };
+const EDGE_PX = 40;
 /** Houses farther apart than this are not one yard, and no drawing shows both. */
 const YARD_M = 1500;
 
@@ -41,6 +43,7 @@ function placed(buildings: BuildingSummary[], origin: GroundPoint): Placed[] {
 
 /** The houses of a farm on the ground, to one scale, north up. Left out where they do not make one yard. */
 export function YardPlan({ buildings, units }: YardPlanProps) {
+  const { width, height } = useMedia(PHONE) ? HAND : DESK;
   const [first] = buildings;
   if (first === undefined) return null;
   const houses = placed(buildings, first);
@@ -54,10 +57,10 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
   };
   const spanM = { x: box.east - box.west, y: box.north - box.south };
   if (Math.max(spanM.x, spanM.y) > YARD_M) return null;
-  const scale = Math.min((WIDTH_PX - 2 * EDGE_PX) / spanM.x, (HEIGHT_PX - 2 * EDGE_PX) / spanM.y, 6);
+  const scale = Math.min((width - 2 * EDGE_PX) / spanM.x, (height - 2 * EDGE_PX) / spanM.y, 6);
   const middle = { x: (box.west + box.east) / 2, y: (box.south + box.north) / 2 };
-  const x = (m: number) => WIDTH_PX / 2 + (m - middle.x) * scale;
-  const y = (m: number) => HEIGHT_PX / 2 - (m - middle.y) * scale;
+  const x = (m: number) => width / 2 + (m - middle.x) * scale;
+  const y = (m: number) => height / 2 - (m - middle.y) * scale;
   const path = (points: { x: number; y: number }[]) =>
     points
       .map((point, index) => `${index === 0 ? "M" : "L"}${x(point.x).toFixed(1)} ${y(point.y).toFixed(1)}`)
@@ -69,7 +72,7 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
         On the ground
       </h2>
       <svg
-        viewBox={`0 0 ${WIDTH_PX} ${HEIGHT_PX}`}
+        viewBox={`0 0 ${width} ${height}`}
         role="img"
         aria-label={`Ground plan, north up: ${buildings.map((building) => `${building.name}, ridge at ${Math.round(building.ridgeBearingDeg)}°`).join("; ")}`}
         className="mt-3 block w-full border border-ink bg-map-land"
@@ -78,6 +81,9 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
           const kind = verdictKind(building.plan);
           const right = Math.max(...plan.map((point) => x(point.x)));
           const top = Math.min(...plan.map((point) => y(point.y)));
+          const bottom = Math.max(...plan.map((point) => y(point.y)));
+          const middleX = plan.reduce((sum, point) => sum + x(point.x), 0) / plan.length;
+          const roomy = right - Math.min(...plan.map((point) => x(point.x))) > building.name.length * 9;
           return (
             <g key={building.id}>
               <path
@@ -89,30 +95,25 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
               />
               <path d={path(ridge)} stroke="var(--color-ink)" strokeDasharray="7 3 2 3" fill="none" />
               <text
-                x={(x(plan[0]?.x ?? 0) + x(plan[2]?.x ?? 0)) / 2}
-                y={(y(plan[0]?.y ?? 0) + y(plan[2]?.y ?? 0)) / 2 + 5}
+                x={middleX}
+                y={roomy ? (top + bottom) / 2 + 5 : bottom + 19}
                 textAnchor="middle"
                 fontSize={15}
                 fontWeight={700}
                 fill="var(--color-ink)"
-                stroke="var(--color-sheet)"
+                stroke={roomy ? "var(--color-sheet)" : "var(--color-map-land)"}
                 strokeWidth={4}
                 paintOrder="stroke"
               >
                 {building.name}
               </text>
-              <g transform={`translate(${Math.min(right - 8, WIDTH_PX - 26)} ${Math.max(top - 12, 4)})`}>
+              <g transform={`translate(${Math.min(right - 8, width - 26)} ${Math.max(top - 12, 4)})`}>
                 <VerdictMark kind={kind} size={20} />
               </g>
             </g>
           );
         })}
-        <g
-          transform={`translate(${WIDTH_PX - 34} 24)`}
-          fill="none"
-          stroke="var(--color-ink)"
-          strokeWidth={1.8}
-        >
+        <g transform={`translate(${width - 34} 24)`} fill="none" stroke="var(--color-ink)" strokeWidth={1.8}>
           <path d="M0 34V0M-6 10 0 0l6 10" />
           <text
             y={50}
@@ -125,7 +126,7 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
             N
           </text>
         </g>
-        <g transform={`translate(20 ${HEIGHT_PX - 22})`}>
+        <g transform={`translate(20 ${height - 22})`}>
           <rect width={bar.widthPx} height={7} fill="var(--color-sheet)" stroke="var(--color-ink)" />
           <rect width={bar.widthPx / 2} height={7} fill="var(--color-ink)" />
           <text y={-6} x={bar.widthPx} fontSize={14} fill="var(--color-ink)">

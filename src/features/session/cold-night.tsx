@@ -72,22 +72,22 @@ function arrow(middle: number, bottom: number, width: number): string {
   return `M${middle - half} ${bottom}V${neck}H${middle - head}L${middle} ${neck - head * 0.95}L${middle + head} ${neck}H${middle + half}V${bottom}Z`;
 }
 
-/** Fixed places, so that the sky is the same at every visit. */
-const stars = Array.from({ length: 150 }, (_, index) => ({
-  x: (index * 137.508) % 860,
-  y: (index * index * 7.31) % 330,
+/** Fixed places, so that the sky is the same at every visit; none where the words stand on a wide screen. */
+const stars = Array.from({ length: 260 }, (_, index) => ({
+  x: ((index * 137.508) % 1300) - 220,
+  y: ((index * index * 7.31) % 830) - 500,
   size: index % 9 === 0 ? 1.7 : 0.9,
-}));
+})).filter((star) => star.y > -120 || star.x > 520);
 
-const earth = Array.from({ length: 44 }, (_, index) => index * 20);
+const earth = Array.from({ length: 84 }, (_, index) => index * 20 - 400);
 
 /** Houses of the trade to one scale under a clear sky: the night everything here is planned for. */
 export function ColdNight() {
   return (
     <svg
       viewBox="0 0 860 540"
-      preserveAspectRatio="xMidYMax slice"
-      className="absolute inset-0 h-full w-full"
+      preserveAspectRatio="xMidYMax meet"
+      className="absolute inset-0 h-full w-full overflow-visible"
       aria-hidden="true"
     >
       <defs>
