@@ -19,7 +19,7 @@ import { isAlive } from "./lock.mjs";
 import { installDebianPackages } from "./packages.mjs";
 import { socketPath } from "./paths.mjs";
 import { freePort } from "./ports.mjs";
-import { PlainError, say } from "./say.mjs";
+import { PlainError } from "./say.mjs";
 
 const server = "/usr/sbin/mariadbd";
 const initialiser = "/usr/bin/mariadb-install-db";
@@ -55,7 +55,7 @@ function secretOf(folder) {
 async function createDataFolder(folder, account) {
   const dataDir = join(folder, "database");
   if (existsSync(dataDir)) return dataDir;
-  say("Making a database folder.");
+  process.stderr.write("Making a database folder.\n");
   const half = join(folder, "database-half-made");
   rmSync(half, { recursive: true, force: true });
   mkdirSync(half);

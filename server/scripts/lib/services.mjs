@@ -3,7 +3,6 @@ import { existsSync, readFileSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { runOrFail, start, waitForLine } from "./children.mjs";
 import { projectFolder } from "./paths.mjs";
-import { say } from "./say.mjs";
 import { contentHash, stampMatches } from "./stamps.mjs";
 
 export const tsx = ["--import", "tsx"];
@@ -68,7 +67,7 @@ export async function buildPages() {
   ];
   const hash = contentHash(projectFolder, sources);
   if (stampMatches(stamp, hash)) return;
-  say("Building the pages.");
+  process.stderr.write("Building the pages.\n");
   await runOrFail(
     process.execPath,
     ["node_modules/vite/bin/vite.js", "build", "--logLevel", "warn"],
