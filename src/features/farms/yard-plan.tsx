@@ -11,6 +11,8 @@ import { PHONE, useMedia } from "../../lib/use-media.ts";
 const DESK = { width: 620, height: 330 };
 const HAND = { width: 356, height: 230 };
 const EDGE_PX = 40;
+/** Kept free below the houses for the scale bar. */
+const FOOT_PX = 34;
 /** Houses farther apart than this are not one yard, and no drawing shows both. */
 const YARD_M = 1500;
 
@@ -57,10 +59,10 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
   };
   const spanM = { x: box.east - box.west, y: box.north - box.south };
   if (Math.max(spanM.x, spanM.y) > YARD_M) return null;
-  const scale = Math.min((width - 2 * EDGE_PX) / spanM.x, (height - 2 * EDGE_PX) / spanM.y, 6);
+  const scale = Math.min((width - 2 * EDGE_PX) / spanM.x, (height - FOOT_PX - 2 * EDGE_PX) / spanM.y, 6);
   const middle = { x: (box.west + box.east) / 2, y: (box.south + box.north) / 2 };
   const x = (m: number) => width / 2 + (m - middle.x) * scale;
-  const y = (m: number) => height / 2 - (m - middle.y) * scale;
+  const y = (m: number) => (height - FOOT_PX) / 2 - (m - middle.y) * scale;
   const path = (points: { x: number; y: number }[]) =>
     points
       .map((point, index) => `${index === 0 ? "M" : "L"}${x(point.x).toFixed(1)} ${y(point.y).toFixed(1)}`)
@@ -79,6 +81,9 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
       >
         {houses.map(({ building, plan, ridge }) => {
           const kind = verdictKind(building.plan);
+          const topX = x(
+            plan.reduce((best, point) => (point.y > best.y ? point : best), plan[0] ?? { x: 0, y: 0 }).x,
+          );
           const right = Math.max(...plan.map((point) => x(point.x)));
           const top = Math.min(...plan.map((point) => y(point.y)));
           const bottom = Math.max(...plan.map((point) => y(point.y)));
@@ -107,7 +112,7 @@ export function YardPlan({ buildings, units }: YardPlanProps) {
               >
                 {building.name}
               </text>
-              <g transform={`translate(${Math.min(right - 8, width - 26)} ${Math.max(top - 12, 4)})`}>
+              <g transform={`translate(${Math.min(topX - 4, width - 26)} ${Math.max(top - 14, 4)})`}>
                 <VerdictMark kind={kind} size={20} />
               </g>
             </g>

@@ -86,7 +86,7 @@ function FitRows({ bounds }: { bounds: string }) {
         [south, west],
         [north, east],
       ],
-      { padding: [26, 26], maxZoom: 12 },
+      { padding: [40, 30], maxZoom: 12 },
     );
   }, [bounds, map]);
   return null;

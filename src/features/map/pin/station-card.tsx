@@ -39,12 +39,14 @@ export function StationCard({ position }: { position: Position | null }) {
       <p className="m-0 text-sm text-ink-2">Weather from</p>
       <p className="m-0 font-bold">{`${best.name}, ${best.country}`}</p>
       <dl className="m-0 mt-2 grid grid-cols-2 gap-x-4 gap-y-1">
-        {facts.map((fact) => (
-          <div key={fact.name} className="flex flex-col-reverse">
-            <dt className="text-xs text-ink-2">{fact.name}</dt>
-            <dd className="m-0 font-semibold">{fact.value}</dd>
-          </div>
-        ))}
+        {facts
+          .filter((fact) => fact.value !== null)
+          .map((fact) => (
+            <div key={fact.name} className="flex flex-col-reverse">
+              <dt className="text-xs text-ink-2">{fact.name}</dt>
+              <dd className="m-0 font-semibold">{fact.value}</dd>
+            </div>
+          ))}
       </dl>
       {best.caution ? (
         <p className="m-0 mt-2 border-l-[6px] border-straw bg-straw-tint p-2 text-sm">{best.caution}</p>
