@@ -1,5 +1,5 @@
 import { type OutsideModel, outsideConvectionWM2K } from "../envelope/convection.ts";
-import { type CoverSolver, prepareCoverSolver } from "../envelope/cover-balance.ts";
+import { type CoverBalance, type CoverSolver, prepareCoverSolver } from "../envelope/cover-balance.ts";
 import type { CoverStack } from "../envelope/cover-types.ts";
 import type { ScreenInput } from "../plan/house-input.ts";
 import type { FluxGroup, OutsideHour, SurfaceFlux } from "./surface-model.ts";
@@ -55,20 +55,41 @@ export function prepareStackFlux(surface: StackSurface): FluxGroup["flux"] {
 
 type PlainFlux = (insideTempC: number, outside: OutsideHour, sunWM2: number) => SurfaceFlux;
 
+/**
+ * Loss of one cover, and how much of it the cold sky brings about: the loss less what it would be under a sky as warm as the air.
+ * So told, no part is negative while a skin is colder than the air, and insulation is not hidden behind the skin's own exchange.
+ */
 function warmStarted(surface: StackSurface, stack: CoverStack): PlainFlux {
+  const underSky = rememberingSolver(surface, stack);
+  const underAir = rememberingSolver(surface, stack);
+  return (insideTempC, outside, sunWM2) => {
+    const { fromRoomWM2, faceTempsC } = underSky(insideTempC, outside, outside.skyTempC, sunWM2);
+    return {
+      lossWM2: fromRoomWM2,
+      // Worked out when it is read: searches for a balance ask for the loss alone, many times.
+      get toSkyWM2() {
+        return fromRoomWM2 - underAir(insideTempC, outside, outside.airTempC, sunWM2).fromRoomWM2;
+      },
+      faceTempsC,
+    };
+  };
+}
+
+/** A solver that starts from where it last stood. */
+function rememberingSolver(surface: StackSurface, stack: CoverStack) {
   let solver: CoverSolver | undefined;
   let lastFacesC: number[] | undefined;
   const absorptances = stack.layers.map((layer) =>
     Math.max(0, 1 - layer.solarTransmittance - layer.solarReflectance),
   );
-  return (insideTempC, outside, sunWM2) => {
+  return (insideTempC: number, outside: OutsideHour, skyC: number, sunWM2: number): CoverBalance => {
     solver ??= prepareCoverSolver(stack);
     const balance = solver.solve(
       {
         insideAirC: insideTempC,
         insideRadiantC: insideTempC,
         outsideAirC: outside.airTempC,
-        skyC: outside.skyTempC,
+        skyC,
         groundC: outside.airTempC,
         skyViewFrac: surface.view.skyFrac,
         tiltDeg: surface.tiltDeg,
@@ -78,11 +99,7 @@ function warmStarted(surface: StackSurface, stack: CoverStack): PlainFlux {
       lastFacesC,
     );
     lastFacesC = balance.faceTempsC;
-    return {
-      lossWM2: balance.fromRoomWM2,
-      toSkyWM2: balance.toSkyWM2,
-      faceTempsC: balance.faceTempsC,
-    };
+    return balance;
   };
 }
 
