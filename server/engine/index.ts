@@ -39,6 +39,8 @@ export {
 } from "./air/moist-air.ts";
 // Saturation over ice and water, and its inverse.
 export { dewPointFromPressureC, saturationPressurePa } from "./air/saturation.ts";
+// Heat to warm the air that replaces exhaust.
+export { exhaustHeatWhM3K } from "./air/ventilation-air.ts";
 // Wetted thermometer.
 export { wetBulbC } from "./air/wet-bulb.ts";
 
@@ -157,6 +159,28 @@ export {
 export type { StockHeat, StockHeatInput } from "./livestock/animal-heat.ts";
 // Heat, water and carbon dioxide of a herd or flock.
 export { animalHeat, CARBON_DIOXIDE_M3H_PER_KW } from "./livestock/animal-heat.ts";
+export type { BarnHeat, BarnHeatInput, TemperatureSpan } from "./livestock/barn-heat.ts";
+// A stocked barn on one night, and hours colder than a temperature.
+export { barnHeat, hoursBelow } from "./livestock/barn-heat.ts";
+export type { Bed } from "./livestock/critical-temperature.ts";
+// Temperatures below which animals burn feed to keep warm.
+export {
+  calfLowerCriticalC,
+  lowerCriticalTempC,
+  pigCriticalTempC,
+  pigLowerCriticalC,
+  SETPOINT_ABOVE_CRITICAL_K,
+  setpointTooCold,
+} from "./livestock/critical-temperature.ts";
+export type { FanPlan, FanPlanStep, FanStage, FlowComparison } from "./livestock/fans.ts";
+// Fans: timers, stages, least flow, measured against needed.
+export { compareFlow, fanPlan, leastFlowM3H, timerFlowM3H, timerRunS } from "./livestock/fans.ts";
+export type { HeadRateRule } from "./livestock/head-rate.ts";
+// Published winter rates for each animal.
+export { broilerMetabolicM3H, headRateM3H } from "./livestock/head-rate.ts";
+export type { ExchangerInput, ExchangerResult } from "./livestock/heat-recovery.ts";
+// Air-to-air exchangers with their frost limit.
+export { exchanger, frostLimitC } from "./livestock/heat-recovery.ts";
 export type { CarbonDioxideSource, HeatRule } from "./livestock/heat-rules.ts";
 // Three published rules for the split, and carbon dioxide by what is counted.
 export {
@@ -169,18 +193,29 @@ export {
 export type { UnitHeat } from "./livestock/house-split.ts";
 // Split into air and water, activity through the day.
 export { activityRatio, unitHeat } from "./livestock/house-split.ts";
+export type { LeakRule, Tightness } from "./livestock/leaks.ts";
+// Leaks under fans, at other pressures, by suction test.
+export { airWithLeaksM3H, leakAtPressure, tightnessFromSuction } from "./livestock/leaks.ts";
 export type {
   MinimumVentilation,
   MinimumVentilationInput,
   VentilationRule,
 } from "./livestock/minimum-ventilation.ts";
-// Least ventilation, leaks, heat recovery, balance temperature.
+// Least ventilation with the rule that governs, heat recovery, balance temperature.
 export {
   balanceTempC,
-  fanAndLeakM3H,
   heatRecoveryFrac,
   minimumVentilation,
 } from "./livestock/minimum-ventilation.ts";
+export type { SchedulePoint } from "./livestock/schedule.ts";
+// Set-points, rates and masses by day of the batch.
+export { dayOfMass, massOnDayKg, scheduleValue } from "./livestock/schedule.ts";
+export type { StockEntry, StockNow } from "./livestock/stock-entry.ts";
+// Stock given as count, live mass or day of a batch.
+export { stockNow } from "./livestock/stock-entry.ts";
+export type { VentilationCost, VentilationCostInput } from "./livestock/ventilation-cost.ts";
+// What each ventilation rule costs.
+export { ventilationCosts } from "./livestock/ventilation-cost.ts";
 
 // -- heaters
 

@@ -10,6 +10,8 @@ export interface MinimumVentilation {
   governs: VentilationRule;
   /** What each rule asks for, m³/h. */
   partsM3H: Record<VentilationRule, number>;
+  /** False where outdoor air is so wet that no flow can hold the humidity limit; the moisture part is then 0. */
+  humidityCanBeHeld: boolean;
 }
 
 export interface MinimumVentilationInput {
@@ -29,13 +31,13 @@ export interface MinimumVentilationInput {
 }
 
 /** More than this is summer ventilation; moisture cannot be carried off by air that is nearly as wet. */
-const MOST_AIR_CHANGES_FOR_MOISTURE_KG = 1e7;
+const MOST_AIR_FOR_MOISTURE_KG_H = 1e7;
 
 /**
  * Air that must pass a stocked house in cold weather: the most of what water, carbon dioxide, the rate per head and the law ask for.
  *
  * Units kg/h, m³/h, °C, 0 to 1, ppm, Pa → m³/h at inside conditions. When outdoor air holds as much water as the limit allows
- * inside, moisture cannot govern and its part is 0. Errors EngineInputError.
+ * inside, moisture cannot govern: its part is 0 and `humidityCanBeHeld` false. Errors EngineInputError.
  * Source: mass balances; limits [EU-2007-43].
  */
 export function minimumVentilation(input: MinimumVentilationInput): MinimumVentilation {
@@ -56,38 +58,29 @@ export function minimumVentilation(input: MinimumVentilationInput): MinimumVenti
   );
   requireInRange("headCount", input.headCount, 0, 1_000_000);
   requireInRange("perHeadM3H", input.perHeadM3H, 0, 2000, "m³/h");
+  const moistureM3H = moistureFlowM3H(input, pressurePa);
   const partsM3H: Record<VentilationRule, number> = {
-    moisture: moistureFlowM3H(input, pressurePa),
+    moisture: moistureM3H ?? 0,
     carbonDioxide: (input.carbonDioxideM3H * 1e6) / (carbonDioxideLimitPpm - outdoorCarbonDioxidePpm),
     perHead: input.headCount * input.perHeadM3H,
-    legal: input.legalM3H ?? 0,
+    legal: requireInRange("legalM3H", input.legalM3H ?? 0, 0, 1e8, "m³/h"),
   };
   const rules = Object.keys(partsM3H) as VentilationRule[];
   const governs = rules.reduce(
     (best, rule) => (partsM3H[rule] > partsM3H[best] ? rule : best),
     rules[0] as VentilationRule,
   );
-  return { flowM3H: partsM3H[governs], governs, partsM3H };
+  return { flowM3H: partsM3H[governs], governs, partsM3H, humidityCanBeHeld: moistureM3H !== null };
 }
 
-function moistureFlowM3H(input: MinimumVentilationInput, pressurePa: number): number {
+/** Null where no flow can carry the water off. */
+function moistureFlowM3H(input: MinimumVentilationInput, pressurePa: number): number | null {
   const inside = humidityRatio(input.insideTempC, input.humidityLimitFrac, pressurePa);
   const outside = humidityRatio(input.outdoorTempC, input.outdoorHumidityFrac, pressurePa);
-  if (input.moistureKgH === 0 || inside - outside < input.moistureKgH / MOST_AIR_CHANGES_FOR_MOISTURE_KG)
-    return 0;
+  if (input.moistureKgH === 0) return 0;
+  if (inside - outside < input.moistureKgH / MOST_AIR_FOR_MOISTURE_KG_H) return null;
   const dryAirKgH = input.moistureKgH / (inside - outside);
   return dryAirKgH * specificVolumeM3Kg(input.insideTempC, inside, pressurePa);
-}
-
-/**
- * Air change of a barn whose fans suck: leaks are part of the fan's flow, not on top of it.
- *
- * Units m³/h → m³/h. Errors EngineInputError. Source: common practice, larger of the two.
- */
-export function fanAndLeakM3H(fanM3H: number, leakM3H: number): number {
-  requireInRange("fanM3H", fanM3H, 0, 1e8, "m³/h");
-  requireInRange("leakM3H", leakM3H, 0, 1e8, "m³/h");
-  return Math.max(fanM3H, leakM3H);
 }
 
 /**
