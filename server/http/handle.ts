@@ -1,5 +1,5 @@
 import type { Request, RequestHandler, Response } from "express";
-import type { Sequelize } from "sequelize";
+import { type Sequelize, Transaction } from "sequelize";
 import type { z } from "zod";
 import type { Config } from "../config.ts";
 import { invalid, notSignedIn } from "../errors.ts";
@@ -7,6 +7,12 @@ import type { Mail } from "../features/mail/mailer.ts";
 import { loadActor } from "../features/session/load-actor.ts";
 import { csrfTokenOf } from "./csrf.ts";
 import type { Route } from "./route.ts";
+
+/**
+ * Each read sees what others have kept by then. Under the database's own default a read after waiting for a lock would still see
+ * the rows of the moment the transaction began.
+ */
+const ISOLATION = Transaction.ISOLATION_LEVELS.READ_COMMITTED;
 
 export interface Services {
   sequelize: Sequelize;
@@ -50,7 +56,7 @@ export function handle(route: Route, services: Services): RequestHandler {
     if (actor === null) throw notSignedIn();
     const input = parse(route, request);
     const outgoing = services.mailer.open();
-    const answer = await services.sequelize.transaction((transaction) =>
+    const answer = await services.sequelize.transaction({ isolationLevel: ISOLATION }, (transaction) =>
       route.run({
         input,
         actor,

@@ -111,6 +111,14 @@ describe("from survey to decision", () => {
     );
   });
 
+  it("plans asked for at the same moment take numbers of their own", async () => {
+    const answers = await Promise.all(
+      Array.from({ length: 6 }, () => world.advisor.post(`/api/buildings/${world.buildingId}/plans`, {})),
+    );
+    expect(answers.map((answer) => answer.status)).toEqual([201, 201, 201, 201, 201, 201]);
+    expect(new Set(answers.map((answer) => answer.body.number)).size).toBe(6);
+  });
+
   it("a preview keeps nothing", async () => {
     const { survey } = (await world.advisor.get(`/api/buildings/${world.buildingId}/survey`)).body;
     const plans = (await world.advisor.get(`/api/buildings/${world.buildingId}/plans`)).body.items.length;
