@@ -32,12 +32,13 @@ export function degreesProblem(text: string, axis: "latitude" | "longitude"): st
   return axis === "longitude" && Math.abs(value) > 180 ? "Longitude must lie between −180° and 180°." : null;
 }
 
+/** The letter of the half of the world stands before or behind its number, never on both sides. */
+const oneDegree = String.raw`([NSEW]\s*\d{1,3}(?:\.\d+)?\s*°?|[-−+]?\d{1,3}(?:\.\d+)?\s*°?\s*[NSEW]?)`;
+const pair = new RegExp(String.raw`^\s*${oneDegree}(?:\s*[,;]\s*|\s+)${oneDegree}\s*$`, "i");
+
 /** Both numbers pasted at once, "53.36, -7.48" or "41.2 S 172.6 E"; null when it is not such a pair. */
 export function parsePair(text: string): { latitudeDeg: number; longitudeDeg: number } | null {
-  const match =
-    /^\s*([NSEW]?\s*[-−+]?\d{1,3}(?:\.\d+)?\s*°?\s*[NSEW]?)(?:\s*[,;]\s*|\s+)([NSEW]?\s*[-−+]?\d{1,3}(?:\.\d+)?\s*°?\s*[NSEW]?)\s*$/i.exec(
-      text,
-    );
+  const match = pair.exec(text);
   const [first = "", second = ""] = match?.slice(1) ?? [];
   const turned = /[EW]/i.test(first) || /[NS]/i.test(second);
   const [latitude, longitude] = turned ? [second, first] : [first, second];

@@ -42,12 +42,17 @@ export function PinPage({ farms, buildings, cooperativeId, system }: PinPageProp
   const phone = useMedia(PHONE);
   const pin = usePinBuilding();
   const [map, setMap] = useState<LeafletMap | null>(null);
-  const [missing, setMissing] = useState<Record<string, string>>({});
+  const [tried, setTried] = useState(false);
   const [clicks, setClicks] = useState<GroundPoint[] | null>(null);
   const [only] = farms;
   const first =
     farms.find((farm) => farm.id === search.get("farm")) ?? (farms.length === 1 ? only : undefined);
-  const [draft, setDraft] = useState<PinDraft>(() => emptyDraft(first?.id ?? "", system));
+  const [draft, keepDraft] = useState<PinDraft>(() => emptyDraft(first?.id ?? "", system));
+  const setDraft = (next: PinDraft) => {
+    keepDraft(next);
+    // A refusal speaks of the answers as they were sent.
+    if (pin.isError) pin.reset();
+  };
   const look = (place: GroundPoint, zoom = TOWN_ZOOM) => map?.setView(latLng(place), zoom);
   const clicked = (point: GroundPoint) => {
     if (clicks === null) return setDraft({ ...draft, position: point });
@@ -57,12 +62,12 @@ export function PinPage({ farms, buildings, cooperativeId, system }: PinPageProp
     setDraft({ ...withFootprint(draft, footprint), position: middle });
     setClicks(null);
   };
+  const missing = tried ? missingParts(draft) : {};
   const { fields, refusal } = sortRefusal(pin.error);
   const asksFar = asksWhetherFar(pin.error);
   const save = (farFromFarmConfirmed: boolean) => {
-    const gaps = missingParts(draft);
-    setMissing(gaps);
-    if (Object.keys(gaps).length > 0) return pin.reset();
+    setTried(true);
+    if (Object.keys(missingParts(draft)).length > 0) return pin.reset();
     pin.mutate(
       { draft, farFromFarmConfirmed },
       { onSuccess: (building) => navigate(`/buildings/${building.id}/survey`) },
