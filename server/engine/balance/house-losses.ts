@@ -38,8 +38,8 @@ export interface HouseLosses {
 }
 
 /**
- * Heat leaving a house by every path at a given inside temperature. "sky" is what the outer faces, and the room through a
- * clear cover, radiate to the sky; "cover" is the rest of what leaves through the surfaces.
+ * Heat leaving a house by every path at a given inside temperature. "sky" is what a sky colder than the
+ * air adds to the loss through the surfaces; "cover" is that loss under a sky as warm as the air.
  * Shape: shell, hour, inside °C → W by path, the total, and the heat through each group. Source [ASHRAEAPP], [AIRHEAT].
  */
 export function houseLosses(shell: HouseShell, hour: ShellHour, insideTempC: number): HouseLosses {

@@ -34,17 +34,14 @@ export function whyFlow(path: HeatPath, balance: HouseBalance, units: Units): Wh
     case "cover":
       return {
         method:
-          "For each surface: heat moves from the room to the inner face, through the layers, and from the outer face to the outside air. The part radiated to the sky is listed apart." +
-          (balance.lossesW.cover < 0
-            ? " Here the outer faces are colder than the outside air, because the sky draws so much: the air warms them, and the amount is below nothing."
-            : ""),
+          "For each surface: heat moves from the room to the inner face, through the layers, and from the outer face into the open, as if the sky were as warm as the outside air. What the cold sky adds is listed apart.",
         parts: [inside, outside, step, ...surfaces],
         restsOn: ["covers", "screen", "shape", "shelter"],
       };
     case "sky":
       return {
         method:
-          "The outer faces, and the room itself where the cover lets warmth through, radiate to a sky that is colder than the air. It grows with the fourth power of the temperatures.",
+          "The outer faces, and the room itself where the cover lets warmth through, radiate to a sky that is colder than the air, by the fourth power of the temperatures. Listed here is what that adds: the loss under this sky less the loss under a sky as warm as the air.",
         parts: [
           { name: "Sky", value: units.temperature(balance.skyTempC) },
           outside,
