@@ -23,10 +23,9 @@ export function usePinBuilding() {
       }),
     onSuccess: (building) => {
       client.setQueryData(["buildings", building.id], building);
-      return Promise.all([
-        client.invalidateQueries({ queryKey: ["buildings"], exact: true }),
-        client.invalidateQueries({ queryKey: ["farms"] }),
-      ]);
+      // Not waited for: the way leads on to the survey, and the lists are fetched when they are next seen.
+      void client.invalidateQueries({ queryKey: ["buildings"], exact: true });
+      void client.invalidateQueries({ queryKey: ["farms"] });
     },
   });
 }
