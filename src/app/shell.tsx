@@ -5,6 +5,7 @@ import { ApiError } from "../lib/api-client.ts";
 import { meQuery } from "../lib/me-query.ts";
 import { Head } from "./head.tsx";
 import { PhoneBar } from "./phone-bar.tsx";
+import { RouteProgress } from "./route-progress.tsx";
 import { useTheme } from "./use-theme.ts";
 
 /** Head, sheet and, on a phone, the bar at the foot. Everything inside needs a signed-in person. */
@@ -28,7 +29,10 @@ export function Shell() {
       >
         To the content
       </a>
-      <Head me={me.data} role={me.data.activeRole} evening={evening} />
+      <div className="relative">
+        <Head me={me.data} role={me.data.activeRole} evening={evening} />
+        <RouteProgress />
+      </div>
       <main
         id="sheet"
         tabIndex={-1}

@@ -55,7 +55,7 @@ export function NewFarmForm({ cooperativeId, onCreated, onCancel }: NewFarmFormP
           {create.error.message}
         </p>
       ) : null}
-      <div className="grid gap-4 md:grid-cols-2">
+      <div className="grid gap-4 md:grid-cols-2 md:items-end">
         <TextField
           label="Name of the farm"
           value={name}
@@ -87,7 +87,7 @@ export function NewFarmForm({ cooperativeId, onCreated, onCancel }: NewFarmFormP
           missing ?? fields["position.latitudeDeg"] ?? fields["position.longitudeDeg"] ?? fields.position
         }
       />
-      <div className="grid gap-4 md:grid-cols-2">
+      <div className="grid gap-4 md:grid-cols-2 md:items-end">
         <TextField
           label="Farmer's name"
           value={farmerName}

@@ -2,12 +2,22 @@ import { useQuery } from "@tanstack/react-query";
 import L from "leaflet";
 import { useEffect } from "react";
 import { useMap } from "react-leaflet";
+import { useSettledView } from "./use-view.ts";
 import { worldOutlineQuery } from "./world-outline.ts";
+
+/** Nearer than this the coarse outlines show their corners. */
+const FINE_ZOOM = 4;
 
 /** Land, shores and borders. Drawn as vectors with classes, so that day, evening and paper colour them. */
 export function WorldLayer() {
   const map = useMap();
-  const { data, isError } = useQuery(worldOutlineQuery);
+  useSettledView();
+  const close = map.getZoom() >= FINE_ZOOM;
+  const coarse = useQuery(worldOutlineQuery("coarse"));
+  const fine = useQuery({ ...worldOutlineQuery("fine"), enabled: close });
+  // Once fetched, the finer outlines serve every view; until then the coarse ones stand in.
+  const data = fine.data ?? coarse.data;
+  const isError = data === undefined && (coarse.isError || fine.isError);
   useEffect(() => {
     if (data === undefined) return;
     const renderer = L.svg({ pane: "tilePane", padding: 0.4 });

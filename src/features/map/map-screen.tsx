@@ -81,7 +81,7 @@ export function MapScreen() {
             fitFirst={first === null}
             onSettled={(at) => set({ at })}
           />
-          <MapLegend />
+          {all.length > 0 ? <MapLegend /> : null}
           <MapControls
             className={phone ? "top-2 right-2" : "top-11 right-6"}
             onAll={

@@ -63,7 +63,8 @@ export function NightStrip({
   units: Units;
 }) {
   if (!hasNight(plan)) {
-    return <span className="block w-44 text-center text-ink-2">not worked out</span>;
+    const words = plan?.verdict === "notApplicable" ? "no heating wanted" : "not worked out";
+    return <span className="block w-44 text-center text-ink-2">{words}</span>;
   }
   const outside = xOf(scale, plan.onceInYearsDesignC);
   const inside = xOf(scale, plan.settlesAtC);

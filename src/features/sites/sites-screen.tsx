@@ -7,6 +7,7 @@ import { downloadCsv } from "../../components/chart/csv.ts";
 import { PageState } from "../../components/page-state.tsx";
 import { verdictKind } from "../../components/plan/verdict.ts";
 import { Segmented } from "../../components/segmented.tsx";
+import { day } from "../../lib/format.ts";
 import { meQuery } from "../../lib/me-query.ts";
 import { sitesQuery } from "../../lib/sites-query.ts";
 import { useUnits } from "../../lib/units.ts";
@@ -85,7 +86,10 @@ export function SitesScreen() {
   return (
     <div className="flex flex-1 flex-col">
       <div className="flex flex-wrap items-center justify-between gap-4 border-b border-rule-strong bg-sheet px-5 py-4">
-        <h1 className="sr-only">Compare sites</h1>
+        <h1 className="sr-only print:not-sr-only print:w-full print:text-lg">
+          {`Compare sites, ${sites.data.cooperativeName}`}
+          <span className="hidden print:inline">{`, ${day(new Date().toISOString())}`}</span>
+        </h1>
         <Answer rows={sites.data.rows} units={units} />
         <div className="flex flex-wrap gap-3 print:hidden">
           <Button kind="plain" onClick={() => downloadCsv("sites.csv", sitesCsv(sorted, units))}>

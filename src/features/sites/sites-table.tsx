@@ -20,7 +20,7 @@ interface SitesTableProps {
 function hours(row: SiteRow): string {
   const { hoursToCriticalLow: low, hoursToCriticalHigh: high } = row.plan ?? {};
   if (low === null || low === undefined || high === null || high === undefined) return "–";
-  return `${low.toFixed(1)} to ${high.toFixed(1)}`;
+  return `${low.toFixed(1)}\u00a0to\u00a0${high.toFixed(1)}`;
 }
 
 function Name({ row, units }: { row: SiteRow; units: Units }) {
@@ -111,7 +111,7 @@ export function SitesTable({ rows, units, sort, chosenId, onSort }: SitesTablePr
       header: "Short",
       unit: units.symbol("power"),
       ...right,
-      cell: (row) => (verdictKind(row.plan) === "unfinished" ? "–" : figure(row.plan?.shortW, "power")),
+      cell: (row) => (degreesBelow(row) === null ? "–" : figure(row.plan?.shortW, "power")),
     },
     { key: "hours", header: "Until critical", unit: "h", ...right, cell: hours },
     {

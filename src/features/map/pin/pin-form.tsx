@@ -33,6 +33,8 @@ interface PinFormProps {
   /** True once the server has asked whether a far place is meant. */
   asksFar: boolean;
   busy: boolean;
+  /** Where the person came from. */
+  backTo: string;
   onSave(farFromFarmConfirmed: boolean): void;
 }
 
@@ -158,7 +160,7 @@ export function PinForm(props: PinFormProps) {
           <Button type="submit" busy={busy}>
             Keep it and survey
           </Button>
-          <Link to="/map" className={buttonLook("plain")}>
+          <Link to={props.backTo} className={buttonLook("plain")}>
             Leave it
           </Link>
         </div>

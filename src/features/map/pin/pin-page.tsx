@@ -98,6 +98,7 @@ export function PinPage({ farms, buildings, cooperativeId, system }: PinPageProp
             }
             asksFar={asksFar}
             busy={pin.isPending}
+            backTo={search.has("farm") && first ? `/farms/${first.id}` : "/map"}
             onSave={save}
           />
         </PhoneSheet>
