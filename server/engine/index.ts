@@ -219,14 +219,46 @@ export { ventilationCosts } from "./livestock/ventilation-cost.ts";
 
 // -- heaters
 
+export type { CombustionYield, Hydrocarbon } from "./heaters/combustion.ts";
+// Water and carbon dioxide of burning, net over gross heating value.
+export { combustionYield, hydrocarbons } from "./heaters/combustion.ts";
+export type { AltitudeRule, PlateRating } from "./heaters/delivered-output.ts";
 // What a heater really gives.
-export { altitudeFactor, deliveredOutputW } from "./heaters/delivered-output.ts";
+export { altitudeFactor, deliveredOutputW, rowOutputW } from "./heaters/delivered-output.ts";
+export type { EfficiencyBasis } from "./heaters/efficiency-basis.ts";
+// Efficiency on the gross value.
+export { grossEfficiencyFrac } from "./heaters/efficiency-basis.ts";
+export type { HeatPumpSource, HeatPumpSpan } from "./heaters/heat-pump.ts";
+// Heat pumps: COP by lift, season, break-even with a fuel, output in the cold.
+export {
+  airSourceOutputFrac,
+  breakEvenCop,
+  flowTempsC,
+  heatPumpCop,
+  seasonalCop,
+} from "./heaters/heat-pump.ts";
+export type { HeaterCandidate } from "./heaters/heater-candidates.ts";
 // Ways to fit a house.
 export { heaterCandidates, withoutLargestW } from "./heaters/heater-candidates.ts";
+export type { PreheatInput } from "./heaters/preheat.ts";
+// Output that warms an empty house in time.
+export { preheatOutputW } from "./heaters/preheat.ts";
+export type { Proposal, ProposalInput, ProposalKind } from "./heaters/propose-heaters.ts";
+// Proposals in the sizes of one family, with spare and one unit out.
+export { proposeHeaters } from "./heaters/propose-heaters.ts";
 // Sizes heaters are made in.
 export { nextStepW, outputStepsW } from "./heaters/size-steps.ts";
+export type { HeaterControl, LoadHours, StageUse, StagingResult } from "./heaters/staging.ts";
+// Stages through a season, turndown, loss of short cycles.
+export { cyclingLossFrac, leastOutputFrac, stageUse } from "./heaters/staging.ts";
+export type { HeaterFamily, UnitSize } from "./heaters/unit-sizes.ts";
+// Sizes by family in kW or kBtu/h.
+export { equalUnits, heaterFamilies, smallestUnit, unitSizes } from "./heaters/unit-sizes.ts";
 // Burners without a flue.
 export { combustionProducts, unventedBurner } from "./heaters/unvented.ts";
+export type { AirLine, UnventedHouse, UnventedHouseInput } from "./heaters/unvented-house.ts";
+// A house heated without flues, the flames' own air fed back.
+export { flameAirByGasM3HKw, flameAirByWaterM3HKw, unventedHouse } from "./heaters/unvented-house.ts";
 
 // -- failure
 
