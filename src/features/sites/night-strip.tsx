@@ -62,8 +62,9 @@ export function NightStrip({
   scale: StripScale;
   units: Units;
 }) {
+  const unheated = plan?.verdict === "notApplicable";
   if (!hasNight(plan)) {
-    const words = plan?.verdict === "notApplicable" ? "no heating wanted" : "not worked out";
+    const words = unheated ? "no heating wanted" : "not worked out";
     return <span className="block w-44 text-center text-ink-2">{words}</span>;
   }
   const outside = xOf(scale, plan.onceInYearsDesignC);
