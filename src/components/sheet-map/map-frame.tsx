@@ -8,6 +8,8 @@ const BAR_PX = 6;
 export const FRAME_PX = GUTTER_PX + BAR_PX;
 
 const LEAST_STEP_PX = 120;
+/** A label nearer to a corner than this would run off the sheet. */
+const CORNER_PX = 46;
 
 interface Tick {
   deg: number;
@@ -109,16 +111,20 @@ export function MapFrame({ framed = true }: { framed?: boolean }) {
             <rect x={left} y={top} width={right - left} height={bottom - top} />
           </g>
           <g fill="var(--color-ink)" fontSize={13} textAnchor="middle">
-            {meridians.map((tick) => (
-              <text key={tick.deg} x={tick.px} y={GUTTER_PX - 7}>
-                {degreeLabel(tick.deg, "longitude", stepDeg)}
-              </text>
-            ))}
-            {parallels.map((tick) => (
-              <text key={tick.deg} transform={`translate(${GUTTER_PX - 7} ${tick.px}) rotate(-90)`}>
-                {degreeLabel(tick.deg, "latitude", stepDeg)}
-              </text>
-            ))}
+            {meridians
+              .filter((tick) => tick.px > left + CORNER_PX && tick.px < right - CORNER_PX)
+              .map((tick) => (
+                <text key={tick.deg} x={tick.px} y={GUTTER_PX - 7}>
+                  {degreeLabel(tick.deg, "longitude", stepDeg)}
+                </text>
+              ))}
+            {parallels
+              .filter((tick) => tick.px > top + CORNER_PX && tick.px < bottom - CORNER_PX)
+              .map((tick) => (
+                <text key={tick.deg} transform={`translate(${GUTTER_PX - 7} ${tick.px}) rotate(-90)`}>
+                  {degreeLabel(tick.deg, "latitude", stepDeg)}
+                </text>
+              ))}
           </g>
         </>
       ) : (

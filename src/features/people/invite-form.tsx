@@ -36,7 +36,13 @@ export function InviteForm({ cooperativeId }: { cooperativeId: string }) {
     );
   };
   return (
-    <form onSubmit={submit} className="grid content-start gap-4" aria-label="Invite a person" noValidate>
+    <form
+      id="invite"
+      onSubmit={submit}
+      className="grid content-start gap-4"
+      aria-label="Invite a person"
+      noValidate
+    >
       <h2 className="m-0 border-b-2 border-ink pb-1 font-sign text-lg font-bold">Invite a person</h2>
       <TextField label="Name" value={name} onValue={setName} problem={fields.name} autoComplete="off" />
       <TextField

@@ -2,7 +2,7 @@ import { useQuery } from "@tanstack/react-query";
 import { X } from "lucide-react";
 import { useState } from "react";
 import type { PersonView, Role } from "../../../server/contracts/people.ts";
-import { Button } from "../../components/button.tsx";
+import { Button, buttonLook } from "../../components/button.tsx";
 import { ConfirmDialog } from "../../components/confirm-dialog.tsx";
 import { type DataColumn, DataTable } from "../../components/data-table.tsx";
 import { PageState } from "../../components/page-state.tsx";
@@ -103,9 +103,14 @@ export function PeopleScreen() {
   ];
   return (
     <div className="mx-auto grid w-full max-w-[1280px] gap-x-12 gap-y-8 px-4 py-6 md:px-8 lg:grid-cols-[minmax(0,5fr)_minmax(280px,2fr)]">
-      <h1 className="m-0 font-sign text-2xl font-extrabold lg:col-span-2">
-        {counted(people.data.length, "person", "people")}
-      </h1>
+      <div className="flex flex-wrap items-center justify-between gap-3 lg:col-span-2">
+        <h1 className="m-0 font-sign text-2xl font-extrabold">
+          {counted(people.data.length, "person", "people")}
+        </h1>
+        <a href="#invite" className={`${buttonLook("quiet")} lg:hidden`}>
+          Invite a person
+        </a>
+      </div>
       <DataTable
         caption="People of the co-operative"
         columns={columns}

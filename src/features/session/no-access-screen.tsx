@@ -1,9 +1,14 @@
-import { Link } from "react-router-dom";
+import { useQuery } from "@tanstack/react-query";
+import { Link, Navigate } from "react-router-dom";
 import { buttonLook } from "../../components/button.tsx";
 import { Wordmark } from "../../components/wordmark.tsx";
+import { meQuery } from "../../lib/me-query.ts";
 
 /** Signed in with an address that no co-operative has on its list. */
 export function NoAccessScreen() {
+  const { data: me } = useQuery(meQuery);
+  // Whoever was put on a list meanwhile goes on.
+  if (me?.activeRole) return <Navigate to="/" replace />;
   return (
     <main className="mx-auto max-w-[60ch] p-6">
       <Wordmark heightPx={44} />

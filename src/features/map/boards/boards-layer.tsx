@@ -13,11 +13,20 @@ import { Board } from "./board.tsx";
 /** From here on every board stands alone: houses of one yard are told apart. */
 const UNFOLDED_ZOOM = 17;
 const CLOSEST_ZOOM = 17;
+/** From here on there is room to write farms and houses beside their boards. */
+const NAMED_ZOOM = 11;
+const HOUSE_NAMED_ZOOM = 14;
 
 interface BoardsLayerProps {
   buildings: BuildingSummary[];
   chosenId: string | null;
   onChoose(buildingId: string): void;
+}
+
+/** The farm's name where a folded board stands for one farm. */
+function farmOf(items: BuildingSummary[]): string | null {
+  const names = new Set(items.map((item) => item.farmName));
+  return names.size === 1 ? (items[0]?.farmName ?? null) : null;
 }
 
 function worstKind(items: BuildingSummary[]): VerdictKind {
@@ -31,6 +40,7 @@ export function BoardsLayer({ buildings, chosenId, onChoose }: BoardsLayerProps)
   const units = useUnits();
   const layer = useShield<HTMLDivElement>();
   useSettledView();
+  const zoom = map.getZoom();
   const chosen = buildings.filter((building) => building.id === chosenId);
   const others = buildings.filter((building) => building.id !== chosenId);
   const place = (building: BuildingSummary) => {
@@ -38,7 +48,7 @@ export function BoardsLayer({ buildings, chosenId, onChoose }: BoardsLayerProps)
     return { item: building, xPx: point.x, yPx: point.y };
   };
   const groups = [
-    ...foldBoards(others.map(place), map.getZoom() >= UNFOLDED_ZOOM ? 0 : undefined),
+    ...foldBoards(others.map(place), zoom >= UNFOLDED_ZOOM ? 0 : undefined),
     ...chosen.map(place).map(({ item, xPx, yPx }) => ({ items: [item], xPx, yPx })),
   ].sort((a, b) => a.yPx - b.yPx || a.xPx - b.xPx);
   const closer = (group: BoardGroup<BuildingSummary>) => {
@@ -55,6 +65,8 @@ export function BoardsLayer({ buildings, chosenId, onChoose }: BoardsLayerProps)
           const kind = worstKind(group.items);
           const short = group.items.filter((item) => verdictKind(item.plan) === "short").length;
           const isChosen = single && first.id === chosenId;
+          const name = single ? first.name : farmOf(group.items);
+          const named = isChosen || zoom >= (single ? HOUSE_NAMED_ZOOM : NAMED_ZOOM);
           return (
             <button
               key={group.items.map((item) => item.id).join(" ")}
@@ -70,13 +82,13 @@ export function BoardsLayer({ buildings, chosenId, onChoose }: BoardsLayerProps)
               onClick={() => (single ? onChoose(first.id) : closer(group))}
             >
               <Board kind={kind} chosen={isChosen} face={single ? first : { count: group.items.length }} />
-              {single ? (
+              {name === null ? null : (
                 <span
-                  className={`map-name absolute top-full left-1/2 -translate-x-1/2 text-xs font-bold whitespace-nowrap ${isChosen ? "" : "invisible group-hover:visible group-focus-visible:visible"}`}
+                  className={`map-name absolute top-full left-1/2 -translate-x-1/2 text-xs font-bold whitespace-nowrap ${named ? "" : "invisible group-hover:visible group-focus-visible:visible"}`}
                 >
-                  {first.name}
+                  {name}
                 </span>
-              ) : null}
+              )}
             </button>
           );
         })}
