@@ -29,3 +29,24 @@ export interface CoverStack {
   layers: CoverLayer[];
   gaps: CoverGap[];
 }
+
+/** What stands on both sides of a cover at one moment. */
+export interface CoverBoundary {
+  insideAirC: number;
+  /** Temperature of floor, crop or stock as seen from the cover. */
+  insideRadiantC: number;
+  outsideAirC: number;
+  skyC: number;
+  /** Ground and surroundings as seen from outside. */
+  groundC: number;
+  skyViewFrac: number;
+  tiltDeg: number;
+  /** Convective, W/(m² K). */
+  outsideCoefficientWM2K: number;
+  /** Convective; left out, natural convection by tilt. */
+  insideCoefficientWM2K?: number;
+  /** Sun absorbed in each layer, W/m²; left out, none. */
+  absorbedSolarWM2?: number[];
+  /** Vapour pressure of the room; given, water that condenses on the inner face gives its heat to it. */
+  vapourPressurePa?: number;
+}
