@@ -151,7 +151,7 @@ export const demoBarns: DemoHouse[] = [
         heater({
           label: "Box heater",
           type: "direct-fired",
-          rating: q(100, "kBtuH", "plate"),
+          rating: q(150, "kBtuH", "plate"),
           basis: "input",
           efficiency: 92,
           fuel: "lpg",
