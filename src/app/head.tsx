@@ -51,7 +51,7 @@ export function Head({ me, role, evening }: HeadProps) {
         <span className="truncate">{cooperative?.cooperativeName}</span>
       </p>
       <ConnectionCell />
-      <div className="flex items-center border-l border-rule px-3 max-md:hidden">
+      <div className="flex items-center border-l border-rule px-3 max-lg:hidden">
         <Segmented
           label="Units"
           options={unitOptions}
@@ -61,7 +61,7 @@ export function Head({ me, role, evening }: HeadProps) {
       </div>
       <button
         type="button"
-        className="flex items-center gap-2 border-l border-rule px-4 text-sm hover:bg-trough max-md:hidden"
+        className="flex items-center gap-2 border-l border-rule px-4 text-sm hover:bg-trough max-lg:hidden"
         onClick={() => preferences.mutate({ theme: evening ? "day" : "evening" })}
       >
         {evening ? <Sun size={20} aria-hidden="true" /> : <Moon size={20} aria-hidden="true" />}

@@ -5,6 +5,7 @@ import { MapContainer } from "react-leaflet";
 import { KeepSize } from "./keep-size.tsx";
 import { MapFrame } from "./map-frame.tsx";
 import { MapScale } from "./map-scale.tsx";
+import { NamedContainer } from "./named-container.tsx";
 import { PlaceNames } from "./place-names.tsx";
 import { WorldLayer } from "./world-layer.tsx";
 
@@ -55,6 +56,7 @@ export function SheetMap({
         markerZoomAnimation={false}
         fadeAnimation={false}
       >
+        <NamedContainer label={label} />
         <KeepSize />
         <WorldLayer />
         <MapFrame framed={framed} />
