@@ -47,7 +47,7 @@ export function Head({ me, role, evening }: HeadProps) {
           </NavLink>
         ))}
       </nav>
-      <p className="m-0 flex min-w-0 flex-1 items-center border-l border-rule px-5 text-sm text-ink-2 max-lg:invisible">
+      <p className="m-0 flex min-w-0 flex-1 items-center border-l border-rule px-5 text-sm text-ink-2 max-xl:invisible">
         <span className="truncate">{cooperative?.cooperativeName}</span>
       </p>
       <ConnectionCell />

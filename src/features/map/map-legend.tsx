@@ -3,7 +3,7 @@ import { VerdictMark } from "../../components/plan/verdict-mark.tsx";
 /** What the marks on the boards mean. */
 export function MapLegend() {
   return (
-    <div className="pointer-events-none absolute right-6 bottom-6 z-[800] border border-ink bg-sheet px-4 py-3 text-sm max-lg:hidden print:hidden">
+    <div className="pointer-events-none absolute right-6 bottom-6 z-[800] border border-ink bg-sheet px-4 py-3 text-sm max-xl:hidden print:hidden">
       <p className="m-0 font-bold">Each board shows the building's own section</p>
       <ul className="m-0 mt-2 grid list-none gap-1.5 p-0">
         <li className="flex items-center gap-3">
