@@ -260,6 +260,35 @@ export type { AirLine, UnventedHouse, UnventedHouseInput } from "./heaters/unven
 // A house heated without flues, the flames' own air fed back.
 export { flameAirByGasM3HKw, flameAirByWaterM3HKw, unventedHouse } from "./heaters/unvented-house.ts";
 
+// -- fuel
+
+export type { FuelEmissions, WarmingSet } from "./fuel/emissions.ts";
+// Carbon dioxide, fossil and biogenic apart.
+export { fuelEmissions, grossFactorFromNet, warmingAr4, warmingAr5 } from "./fuel/emissions.ts";
+export type { DeliveredKwh, GrossKwh, NetKwh } from "./fuel/energy-kinds.ts";
+// Gross, net and delivered energy, kept apart by type.
+export {
+  deliveredFrom,
+  deliveredKwh,
+  grossFor,
+  grossFromNet,
+  grossKwh,
+  netFromGross,
+  netKwh,
+} from "./fuel/energy-kinds.ts";
+export type { FuelProperties } from "./fuel/fuel-properties.ts";
+export type { EnergyCount, FuelUnit } from "./fuel/fuel-units.ts";
+// Every unit the trade counts fuel in.
+export { amountOf, energyOf, fuelUnits, kwhGrossPerUnit, unitsOf } from "./fuel/fuel-units.ts";
+export type { Tariff } from "./fuel/tariff.ts";
+// What fuel costs and what a saving is worth.
+export { periodCost, savingValue } from "./fuel/tariff.ts";
+// Volumes at standard conditions.
+export { liquidExpansionPerK, litresAt15C, standardGasM3 } from "./fuel/volume-correction.ts";
+export type { WoodValue } from "./fuel/wood.ts";
+// Wood by its moisture.
+export { wetBasisMoisture, woodValue } from "./fuel/wood.ts";
+
 // -- failure
 
 // Cooling of a house without heat, carbon dioxide without air.

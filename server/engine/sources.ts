@@ -5,6 +5,7 @@ import { climateSources } from "./climate/sources.ts";
 import { energySources } from "./energy/sources.ts";
 import { envelopeSources } from "./envelope/sources.ts";
 import { failureSources } from "./failure/sources.ts";
+import { fuelSources } from "./fuel/sources.ts";
 import { geometrySources } from "./geometry/sources.ts";
 import { heaterSources } from "./heaters/sources.ts";
 import { livestockSources } from "./livestock/sources.ts";
@@ -30,6 +31,7 @@ export const engineSources: Readonly<Record<string, Source>> = {
   ...energySources,
   ...envelopeSources,
   ...failureSources,
+  ...fuelSources,
   ...geometrySources,
   ...heaterSources,
   ...livestockSources,
