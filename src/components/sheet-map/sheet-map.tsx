@@ -9,9 +9,10 @@ import { NamedContainer } from "./named-container.tsx";
 import { PlaceNames } from "./place-names.tsx";
 import { WorldLayer } from "./world-layer.tsx";
 
+/** A little past the date line on both sides, so that a farm beside it does not stick to the edge. */
 const WORLD: LatLngBoundsExpression = [
-  [-85, -180],
-  [85, 180],
+  [-85, -215],
+  [85, 215],
 ];
 
 export const DEEPEST_ZOOM = 19;

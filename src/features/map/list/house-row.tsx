@@ -5,7 +5,7 @@ import { buttonLook } from "../../../components/button.tsx";
 import { verdictKind, verdictWords } from "../../../components/plan/verdict.ts";
 import { VerdictMark } from "../../../components/plan/verdict-mark.tsx";
 import type { Units } from "../../../lib/units.ts";
-import { houseFacts, houseLine } from "./house-facts.tsx";
+import { houseFacts, houseLine } from "./house-facts.ts";
 
 interface HouseRowProps {
   building: BuildingSummary;

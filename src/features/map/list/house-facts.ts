@@ -8,6 +8,7 @@ export function houseLine(building: BuildingSummary, units: Units): string {
   if (plan === null || plan.verdict === "cannotSay") {
     return `${building.answered} of ${building.questions} answered`;
   }
+  if (plan.verdict === "notApplicable") return units.text(building.floorAreaM2, "area");
   const need = units.figure(plan.requiredW, "power", { decimals: 0 });
   const have = units.figure(plan.installedW, "power", { decimals: 0 });
   return `needs ${need.value}, has ${joined(have)}`;
@@ -26,6 +27,9 @@ export function houseFacts(building: BuildingSummary, units: Units): Fact[] {
       { name: "Floor", value: units.text(building.floorAreaM2, "area") },
       { name: "Survey", value: `${building.answered} of ${building.questions}` },
     ];
+  }
+  if (plan.verdict === "notApplicable") {
+    return [{ name: "Coldest night", value: units.temperature(plan.onceInYearsDesignC) }];
   }
   const facts = [
     { name: "Coldest night", value: units.temperature(plan.onceInYearsDesignC) },
