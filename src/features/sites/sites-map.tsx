@@ -55,11 +55,6 @@ function Numbers({ rows, onChoose }: SitesMapProps) {
             <button
               key={numbers.join(" ")}
               type="button"
-              aria-label={
-                single
-                  ? `Number ${first.number}, ${first.row.buildingName}. Show in the table`
-                  : `Numbers ${numbers.join(", ")}. Show closer`
-              }
               className="absolute flex h-11 min-w-11 -translate-x-1/2 -translate-y-1/2 items-center justify-center bg-transparent p-0"
               style={{ left: group.xPx, top: group.yPx }}
               onClick={() => (single ? onChoose(first.row.buildingId) : closer())}
@@ -68,6 +63,11 @@ function Numbers({ rows, onChoose }: SitesMapProps) {
                 className={`flex h-8 min-w-8 items-center justify-center rounded-full border-2 px-1.5 text-sm font-bold whitespace-nowrap ${looks[worst]}`}
               >
                 {single ? first.number : `${first.number}, +${group.items.length - 1}`}
+              </span>
+              <span className="sr-only">
+                {single
+                  ? ` ${first.row.buildingName}. Show in the table`
+                  : ` Numbers ${numbers.join(", ")}. Show closer`}
               </span>
             </button>
           );
