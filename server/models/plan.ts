@@ -13,7 +13,16 @@ import type { HousePlanInput } from "../engine/plan/house-input.ts";
 import type { PlanResult } from "../engine/plan/plan-types.ts";
 
 /** The few figures lists need, so that they never load a whole result. */
-export type StoredPlanSummary = Omit<PlanSummary, "id" | "number" | "status" | "createdAt" | "outdated">;
+export type StoredPlanSummary = Omit<PlanSummary, "id" | "number" | "status" | "createdAt" | "outdated"> & {
+  /** Where the house stood and whose weather was used; a plan for another place is out of date. */
+  place: PlanPlace;
+};
+
+export interface PlanPlace {
+  latitudeDeg: number;
+  longitudeDeg: number;
+  stationId: string;
+}
 
 export class Plan extends Model<InferAttributes<Plan>, InferCreationAttributes<Plan>> {
   declare id: CreationOptional<string>;

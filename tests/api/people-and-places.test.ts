@@ -114,6 +114,29 @@ describe("people, farms and places", () => {
     expect(pacific.map((place: { country: string }) => place.country)).toContain("FJ");
   });
 
+  it("another station, or another place, makes a plan out of date and leaves an open survey valid", async () => {
+    const plan = (await world.advisor.post(`/api/buildings/${world.buildingId}/plans`, {})).body;
+    expect(plan.outdated).toBe(false);
+    const survey = (await world.advisor.get(`/api/buildings/${world.buildingId}/survey`)).body;
+    const { items } = (await world.advisor.get("/api/climate/stations?latitude=53.36&longitude=-7.48")).body;
+    const changed = await world.advisor.patch(`/api/buildings/${world.buildingId}`, {
+      stationId: items[1].id,
+    });
+    expect(changed.body).toMatchObject({ stationChosen: true, station: { id: items[1].id } });
+    expect((await world.advisor.get(`/api/plans/${plan.id}`)).body.outdated).toBe(true);
+    expect((await world.advisor.post(`/api/plans/${plan.id}/send`, { optionId: "two" })).status).toBe(409);
+    const saved = await world.advisor.put(`/api/buildings/${world.buildingId}/survey`, {
+      version: survey.version,
+      survey: survey.survey,
+    });
+    expect(saved.status).toBe(200);
+    const back = await world.advisor.patch(`/api/buildings/${world.buildingId}`, { stationId: null });
+    expect(back.body).toMatchObject({ stationChosen: false, station: { id: items[0].id } });
+    expect(
+      (await world.advisor.patch(`/api/buildings/${world.buildingId}`, { stationId: "nowhere" })).status,
+    ).toBe(422);
+  });
+
   it("a house too far from any station waits for a person's choice", async () => {
     const body = (await import("../support/factories.ts")).tunnelBody;
     const pinned = await world.advisor.post(`/api/farms/${world.farmId}/buildings`, {

@@ -155,7 +155,7 @@ async function seedPlan(
       survey,
       engineInput,
       result,
-      summary: summaryOfResult(result, survey),
+      summary: summaryOfResult(result, survey, building),
       proposedOptionId: sent ? (noHeaterReason === null ? (proposed?.id ?? null) : "none") : null,
       createdBy: people.advisor.id,
       sentAt: sent ? new Date(Date.now() - 3 * DAY_MS) : null,

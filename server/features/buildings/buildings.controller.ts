@@ -88,10 +88,6 @@ export async function updateBuilding({ input, actor, transaction }: Call<typeof 
   }
   if (stationId !== undefined) await chooseStation(building, stationId);
   else if (position !== undefined && !building.stationChosen) await chooseStation(building, null);
-  // A plan worked out for another place or another station must be seen to be out of date.
-  if (building.changed("stationId") || building.changed("latitudeDeg") || building.changed("longitudeDeg")) {
-    building.version += 1;
-  }
   await building.save({ transaction });
   await recordEvent(
     {

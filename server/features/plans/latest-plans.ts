@@ -6,14 +6,24 @@ import { Plan } from "../../models/plan.ts";
 /** Everything of a plan but its large frozen documents. */
 export const planListAttributes = { exclude: ["survey", "engineInput", "result"] };
 
-export function summaryOf(plan: Plan, building: Pick<Building, "version">): PlanSummary {
+type PlannedBuilding = Pick<Building, "version" | "latitudeDeg" | "longitudeDeg" | "stationId">;
+
+/** True when survey, place or weather station were changed after the plan was worked out. */
+export function isOutdated({ surveyVersion, summary: { place } }: Plan, building: PlannedBuilding): boolean {
+  const stationChanged = building.stationId !== null && building.stationId !== place.stationId;
+  const moved = building.latitudeDeg !== place.latitudeDeg || building.longitudeDeg !== place.longitudeDeg;
+  return surveyVersion !== building.version || stationChanged || moved;
+}
+
+export function summaryOf(plan: Plan, building: PlannedBuilding): PlanSummary {
+  const { place: _place, ...figures } = plan.summary;
   return {
     id: plan.id,
     number: plan.number,
     status: plan.status,
     createdAt: plan.createdAt.toISOString(),
-    outdated: plan.surveyVersion !== building.version,
-    ...plan.summary,
+    outdated: isOutdated(plan, building),
+    ...figures,
   };
 }
 

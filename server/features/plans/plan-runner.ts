@@ -55,8 +55,9 @@ export async function workOut(
 }
 
 /** The figures lists need. */
-export function summaryOfResult(result: PlanResult, survey: Survey): StoredPlanSummary {
+export function summaryOfResult(result: PlanResult, survey: Survey, building: Building): StoredPlanSummary {
   const { sizing, annual } = result;
+  const { latitudeDeg, longitudeDeg } = building;
   const worst = result.months[sizing.onceInYearsMonth - 1];
   const { known, questions } = countAnswers(survey);
   return {
@@ -73,5 +74,6 @@ export function summaryOfResult(result: PlanResult, survey: Survey): StoredPlanS
     heaterKwh: annual.heaterKwh,
     heaterKwhM2: annual.heaterKwhM2,
     knownFrac: questions === 0 ? 0 : known / questions,
+    place: { latitudeDeg, longitudeDeg, stationId: result.station.id },
   };
 }

@@ -20,7 +20,7 @@ import { loadSurvey } from "../buildings/survey-store.ts";
 import { recordEvent } from "../events/record-event.ts";
 import { answerLetter, messageLetter, planSentLetter } from "../mail/letters.ts";
 import { contactsOf } from "./farm-contacts.ts";
-import { planListAttributes, summaryOf } from "./latest-plans.ts";
+import { isOutdated, planListAttributes, summaryOf } from "./latest-plans.ts";
 import { loadPlan } from "./load-plan.ts";
 import { summaryOfResult, workOut } from "./plan-runner.ts";
 import { isAnswerable, presentPlan } from "./present-plan.ts";
@@ -48,7 +48,7 @@ export async function createPlan({ input, actor, transaction }: Call<typeof crea
       survey,
       engineInput,
       result,
-      summary: summaryOfResult(result, survey),
+      summary: summaryOfResult(result, survey, building),
       createdBy: actor.personId,
     },
     { transaction },
@@ -100,8 +100,10 @@ export async function sendPlan({ input, actor, transaction, mailer, config }: Ca
   const loaded = await loadPlan(input.params.id, "send", actor, transaction);
   const { plan, building, farm } = loaded;
   if (plan.status !== "draft") throw conflict("This plan was sent before.");
-  if (plan.surveyVersion !== building.version) {
-    throw conflict("The survey has changed since this plan was worked out. Work it out again first.");
+  if (isOutdated(plan, building)) {
+    throw conflict(
+      "Survey, place or weather station have changed since this plan was worked out. Work it out again first.",
+    );
   }
   const blocking = plan.result.warnings.find((warning) => warning.severity === "block");
   if (blocking !== undefined) throw conflict(`${blocking.message} ${blocking.action}`);

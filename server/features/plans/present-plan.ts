@@ -7,6 +7,7 @@ import { PlanMessage } from "../../models/plan-message.ts";
 import type { Actor } from "../../policies/actor.ts";
 import { planPolicy } from "../../policies/farm-policy.ts";
 import { presentBuildings } from "../buildings/present-building.ts";
+import { isOutdated } from "./latest-plans.ts";
 import { type LoadedPlan, planTarget } from "./load-plan.ts";
 
 const DAY_MS = 86_400_000;
@@ -83,7 +84,7 @@ export async function presentPlan(
     answeredAt: plan.answeredAt?.toISOString() ?? null,
     answeredBy: answeredBy?.name ?? null,
     changeableUntil: changeableUntil(plan)?.toISOString() ?? null,
-    outdated: plan.surveyVersion !== building.version,
+    outdated: isOutdated(plan, building),
     choices: plan.choices,
     proposedOptionId: plan.proposedOptionId,
     survey: plan.survey,

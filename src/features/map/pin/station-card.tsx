@@ -1,7 +1,7 @@
 import { useQuery } from "@tanstack/react-query";
 import type { Position } from "../../../../server/contracts/common.ts";
+import { nearestStationsQuery, stationQuery } from "../../../lib/stations-query.ts";
 import { useUnits } from "../../../lib/units.ts";
-import { nearestStationsQuery, stationQuery } from "../api/stations.ts";
 
 /** Whose weather the plan will be worked out with, before anything is kept. */
 export function StationCard({ position }: { position: Position | null }) {

@@ -3,7 +3,7 @@ import { Pane, Polyline, useMap } from "react-leaflet";
 import type { Position } from "../../../../server/contracts/common.ts";
 import { useSettledView } from "../../../components/sheet-map/use-view.ts";
 import { latLng } from "../../../lib/footprint.ts";
-import { nearestStationsQuery, stationQuery } from "../api/stations.ts";
+import { nearestStationsQuery, stationQuery } from "../../../lib/stations-query.ts";
 
 /** The weather station whose record will be used, and the way to it. */
 export function StationLine({ position }: { position: Position }) {

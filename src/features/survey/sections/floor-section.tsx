@@ -1,4 +1,8 @@
+import { useQuery } from "@tanstack/react-query";
 import { useWatch } from "react-hook-form";
+import { useParams } from "react-router-dom";
+import { StationChooser } from "../../../components/plan/station-chooser.tsx";
+import { buildingQuery } from "../../../lib/building-query.ts";
 import { unitsFor } from "../../../lib/units.ts";
 import { OptionalPart } from "../fields/optional-part.tsx";
 import { SurveyQuantity } from "../fields/survey-quantity.tsx";
@@ -10,6 +14,8 @@ import { typicalQuantity } from "../fresh-parts.ts";
 export function FloorSection() {
   const { control, library, system } = useSurveyForm();
   const units = unitsFor(system);
+  const { buildingId = "" } = useParams();
+  const building = useQuery({ ...buildingQuery(buildingId), enabled: buildingId !== "" });
   const edge = useWatch({ control, name: "floor.edge" });
   const entry = library.floorEdges.find((row) => row.id === edge.value);
   return (
@@ -37,6 +43,7 @@ export function FloorSection() {
         label="Frost hollow"
         hint="how much colder still nights are here than around"
       />
+      {building.data ? <StationChooser building={building.data} units={units} /> : null}
     </>
   );
 }

@@ -1,8 +1,8 @@
 import { keepPreviousData, queryOptions } from "@tanstack/react-query";
-import type { StationChoice } from "../../../../server/contracts/buildings.ts";
-import type { StationView } from "../../../../server/contracts/climate.ts";
-import type { ListOf, Position } from "../../../../server/contracts/common.ts";
-import { api } from "../../../lib/api-client.ts";
+import type { StationChoice } from "../../server/contracts/buildings.ts";
+import type { StationView } from "../../server/contracts/climate.ts";
+import type { ListOf, Position } from "../../server/contracts/common.ts";
+import { api } from "./api-client.ts";
 
 /** Stations near a place, best first. A hundred metres more or less ask for nothing new. */
 export function nearestStationsQuery(position: Position | null) {
