@@ -289,6 +289,59 @@ export type { WoodValue } from "./fuel/wood.ts";
 // Wood by its moisture.
 export { wetBasisMoisture, woodValue } from "./fuel/wood.ts";
 
+// -- money
+
+export type { Abatement, AbatementInput } from "./money/abatement.ts";
+// Cost of avoided carbon dioxide.
+export { abatementCost } from "./money/abatement.ts";
+// Annuities.
+export { annuityFactor, capitalRecoveryFactor } from "./money/annuity.ts";
+export type { Investment, InvestmentFigures } from "./money/investment.ts";
+// Payback, present value, internal rate, with and without grant.
+export {
+  discountedPaybackYears,
+  internalRate,
+  investmentFigures,
+  netPresentValue,
+  simplePaybackYears,
+  withAndWithoutGrant,
+} from "./money/investment.ts";
+export type { LifeCycle } from "./money/life-cycle.ts";
+// Cost over the whole life.
+export { lifeCycleCost } from "./money/life-cycle.ts";
+export type { PriceKind, YearlyRate } from "./money/rates.ts";
+// Rates in constant prices and with inflation, never mixed.
+export { nominalRate, realRate, requireSamePrices, toReal } from "./money/rates.ts";
+
+// -- bills
+
+// Days by number, dates that exist.
+export { dateOf, dayNumber, daysInMonth } from "./bills/calendar-day.ts";
+export type { BaseSearch, DegreeDayFit, DegreeDayReading } from "./bills/degree-day-fit.ts";
+// Use against degree-days, use of a normal year, best base, what bills can prove.
+export {
+  bestBaseTemp,
+  enoughReadings,
+  fitDegreeDays,
+  leastProvableSavingFrac,
+  normalisedUse,
+} from "./bills/degree-day-fit.ts";
+export type { FitFigures } from "./bills/fit-figures.ts";
+// How well a model follows bills.
+export { fitFigures, fitLimits, fitsBills } from "./bills/fit-figures.ts";
+export type { FoundFault, FuelRecord, RecordFault } from "./bills/fuel-records.ts";
+// Faults of a fuel record, line by line.
+export { recordFaults } from "./bills/fuel-records.ts";
+export type { CauseInput, CauseKind, LikelyCause, MeterUser } from "./bills/likely-causes.ts";
+// Why bills and model differ, and what a shared meter leaves unexplained.
+export { likelyCauses, unexplained } from "./bills/likely-causes.ts";
+export type { UseSpan } from "./bills/settle-records.ts";
+// Estimates, credits and duplicates settled into uses.
+export { settleRecords } from "./bills/settle-records.ts";
+export type { Delivery, TankLevel } from "./bills/tank-use.ts";
+// Use from deliveries and tank levels, shared out by degree-days.
+export { shareOut, useBetweenFills, useBetweenLevels } from "./bills/tank-use.ts";
+
 // -- failure
 
 // Cooling of a house without heat, carbon dioxide without air.

@@ -1,6 +1,7 @@
 import { airSources } from "./air/sources.ts";
 import { balanceSources } from "./balance/sources.ts";
 import { basicSources } from "./basic-sources.ts";
+import { billSources } from "./bills/sources.ts";
 import { climateSources } from "./climate/sources.ts";
 import { energySources } from "./energy/sources.ts";
 import { envelopeSources } from "./envelope/sources.ts";
@@ -9,6 +10,7 @@ import { fuelSources } from "./fuel/sources.ts";
 import { geometrySources } from "./geometry/sources.ts";
 import { heaterSources } from "./heaters/sources.ts";
 import { livestockSources } from "./livestock/sources.ts";
+import { moneySources } from "./money/sources.ts";
 import { planSources } from "./plan/sources.ts";
 import { sizingSources } from "./sizing/sources.ts";
 import { solarSources } from "./solar/sources.ts";
@@ -27,6 +29,7 @@ export const engineSources: Readonly<Record<string, Source>> = {
   ...basicSources,
   ...airSources,
   ...balanceSources,
+  ...billSources,
   ...climateSources,
   ...energySources,
   ...envelopeSources,
@@ -35,6 +38,7 @@ export const engineSources: Readonly<Record<string, Source>> = {
   ...geometrySources,
   ...heaterSources,
   ...livestockSources,
+  ...moneySources,
   ...planSources,
   ...sizingSources,
   ...solarSources,
