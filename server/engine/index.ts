@@ -344,8 +344,34 @@ export { shareOut, useBetweenFills, useBetweenLevels } from "./bills/tank-use.ts
 
 // -- failure
 
+export type { GasInput } from "./failure/air-decay.ts";
+// A gas in a house with some air change.
+export { endGasFrac, gasAfterHoursFrac, hoursToGas } from "./failure/air-decay.ts";
+export type { CoolingInput } from "./failure/cooling.ts";
 // Cooling of a house without heat, carbon dioxide without air.
 export { endTempC, hoursToCarbonDioxide, hoursToTemp, tempAfterHoursC } from "./failure/cooling.ts";
+export type { DangerLimits } from "./failure/danger.ts";
+// What harms animals in still air, and where alarms belong.
+export { alarmTempsC, dangerLimits } from "./failure/danger.ts";
+export type { MassRange } from "./failure/house-mass.ts";
+// Heat a house holds, with its range.
+export { houseMass, massAround } from "./failure/house-mass.ts";
+export type { OutageHouse, OutageMoment } from "./failure/outage.ts";
+// Temperature, carbon dioxide and water after something stops.
+export { hoursUntil, outageCourse, saturatedWaterKgM3 } from "./failure/outage.ts";
+export type { StandbyLoad, StandbyNeed } from "./failure/standby.ts";
+// What a standby generator must carry, and whether it comes in time.
+export { connectsInTime, standbyNeed } from "./failure/standby.ts";
+export type {
+  HoursBand,
+  OutageLimits,
+  OutageResult,
+  Threat,
+  TwoNights,
+  TwoNightsInput,
+} from "./failure/two-nights.ts";
+// Heater out with fans running, and everything off.
+export { twoNights } from "./failure/two-nights.ts";
 
 // -- climate
 
