@@ -152,6 +152,7 @@ export type { AnimalClass, AnimalState, ClassTrust, SplitGroup } from "./livesto
 export {
   animalClasses,
   classTrust,
+  growingPigClass,
   massRangeKg,
   splitGroup,
   totalHeatAt20W,

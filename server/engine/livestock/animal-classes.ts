@@ -40,3 +40,12 @@ export function splitGroup(animal: AnimalClass): SplitGroup {
 export function classTrust(animal: AnimalClass): ClassTrust {
   return classRules[animal].trust;
 }
+
+/** Mass from which a growing pig follows the formula of fattening pigs, kg: that of piglets is stated for 2 to 20 kg. */
+const FATTENING_FROM_KG = 20;
+
+/** Class of a growing pig by its mass, for houses that keep pigs from weaning to the end. Valid 1 to 180 kg. Errors EngineInputError. Source [CIGR2002]. */
+export function growingPigClass(massKg: number): "piglet" | "fatteningPig" {
+  requireInRange("massKg", massKg, 1, 180, "kg");
+  return massKg < FATTENING_FROM_KG ? "piglet" : "fatteningPig";
+}

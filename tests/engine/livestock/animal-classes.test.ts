@@ -4,6 +4,7 @@ import { hourlyActivity, lampActivityRatio } from "../../../server/engine/livest
 import {
   animalClasses,
   classTrust,
+  growingPigClass,
   massRangeKg,
   totalHeatAt20W,
 } from "../../../server/engine/livestock/animal-classes.ts";
@@ -46,6 +47,14 @@ describe("classes of animals", () => {
     );
     expect(() => totalHeatAt20W("beef", { massKg: 300, feedEnergyMjKg: 25 })).toThrow(/feedEnergyMjKg/);
     expect(() => totalHeatAt20W("dairyCow", { massKg: 650, milkKgDay: 9000 })).toThrow(/milkKgDay/);
+  });
+
+  it("pass from piglet to fattening pig without a great step", () => {
+    expect(growingPigClass(12)).toBe("piglet");
+    expect(growingPigClass(20)).toBe("fatteningPig");
+    const before = totalHeatAt20W("piglet", { massKg: 20, feedLevel: 3 });
+    const after = totalHeatAt20W("fatteningPig", { massKg: 20, feedLevel: 3 });
+    expect(Math.abs(after / before - 1)).toBeLessThan(0.15);
   });
 
   it("say which formulas are borrowed", () => {
