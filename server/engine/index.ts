@@ -229,6 +229,11 @@ export { altitudeFactor, deliveredOutputW, rowOutputW } from "./heaters/delivere
 export type { EfficiencyBasis } from "./heaters/efficiency-basis.ts";
 // Efficiency on the gross value.
 export { grossEfficiencyFrac } from "./heaters/efficiency-basis.ts";
+// Pipe rail and heated floors.
+export { floorHeatWM2, pipeHeatWM, pipeWaterTempC, WARMEST_FLOOR_C } from "./heaters/emitters.ts";
+export type { FlameLimits } from "./heaters/flame-lines.ts";
+// Rules for a barn's air with what flames add.
+export { flameLines } from "./heaters/flame-lines.ts";
 export type { HeatPumpSource, HeatPumpSpan } from "./heaters/heat-pump.ts";
 // Heat pumps: COP by lift, season, break-even with a fuel, output in the cold.
 export {
@@ -247,6 +252,9 @@ export { preheatOutputW } from "./heaters/preheat.ts";
 export type { Proposal, ProposalInput, ProposalKind } from "./heaters/propose-heaters.ts";
 // Proposals in the sizes of one family, with spare and one unit out.
 export { proposeHeaters } from "./heaters/propose-heaters.ts";
+export type { LoadSpan } from "./heaters/season-loads.ts";
+// Loads of a season by their hours.
+export { seasonLoads } from "./heaters/season-loads.ts";
 // Sizes heaters are made in.
 export { nextStepW, outputStepsW } from "./heaters/size-steps.ts";
 export type { HeaterControl, LoadHours, StageUse, StagingResult } from "./heaters/staging.ts";

@@ -45,4 +45,18 @@ export const heaterSources = {
     title: "Steps in which heaters are commonly rated, kBtu/h input",
     read: "common practice",
   },
+  PIPERAIL: {
+    author: "Bot, G. P. A.; de Zwart, H. F.",
+    year: 1996,
+    title: "Analysing energy-saving options in greenhouse cultivation using a simulation model",
+    part: "convection of heating pipes of 51 mm",
+    read: "from memory",
+  },
+  EN1264: {
+    author: "CEN",
+    year: 2011,
+    title: "EN 1264-2 Water based surface embedded heating and cooling systems",
+    part: "basic characteristic curve of heated floors, highest floor temperatures",
+    read: "from memory",
+  },
 } as const;
