@@ -93,6 +93,17 @@ describe("tanks", () => {
     expect(() => useBetweenLevels(levels, [])).toThrow(/a delivery or a level is missing/);
   });
 
+  it("count a delivery of the day of a reading after the reading", () => {
+    const levels = [
+      { day: 0, amount: 500 },
+      { day: 30, amount: 200 },
+      { day: 60, amount: 1900 },
+    ];
+    expect(useBetweenLevels(levels, [{ day: 30, amount: 2000 }]).map(({ amount }) => amount)).toEqual([
+      300, 300,
+    ]);
+  });
+
   it("leave the first fill out", () => {
     const spans = useBetweenFills([
       { day: 100, amount: 900 },

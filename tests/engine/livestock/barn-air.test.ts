@@ -48,6 +48,12 @@ describe("fans", () => {
     expect(leastFlowM3H(stages)).toBe(900);
   });
 
+  it("of one stage share the flow, none below its lowest speed", () => {
+    const pair: FanStage[] = [{ name: "Pair", count: 2, flowM3H: 1000, leastFlowFrac: 0.9, timer: false }];
+    expect(fanPlan(pair, 1100).flowM3H).toBe(1800);
+    expect(fanPlan(pair, 950).steps).toEqual([{ name: "Pair", running: 1, flowM3H: 950 }]);
+  });
+
   it("run on a clock for a mean flow, and back", () => {
     fc.assert(
       fc.property(flow, fc.double({ min: 1, max: 300, noNaN: true }), (full, run) => {
@@ -111,6 +117,10 @@ describe("leaks", () => {
         expect(squares).toBeLessThanOrEqual(fans + leaks + 1e-9);
       }),
     );
+  });
+
+  it("and wind meet as the root of squares where that is asked for", () => {
+    expect(airWithLeaksM3H(3000, 4000, "rootOfSquares")).toBeCloseTo(5000, 9);
   });
 
   it("keep their rank at another pressure", () => {
