@@ -296,7 +296,7 @@ export { periodCost, savingValue } from "./fuel/tariff.ts";
 export { liquidExpansionPerK, litresAt15C, standardGasM3 } from "./fuel/volume-correction.ts";
 export type { WoodValue } from "./fuel/wood.ts";
 // Wood by its moisture.
-export { wetBasisMoisture, woodValue } from "./fuel/wood.ts";
+export { wetBasisMoisture, woodFuel, woodValue } from "./fuel/wood.ts";
 
 // -- money
 
@@ -337,7 +337,7 @@ export {
 } from "./bills/degree-day-fit.ts";
 export type { FitFigures } from "./bills/fit-figures.ts";
 // How well a model follows bills.
-export { fitFigures, fitLimits, fitsBills } from "./bills/fit-figures.ts";
+export { fitFigures, fitLimits, fitsBills, readingsOff } from "./bills/fit-figures.ts";
 export type { FoundFault, FuelRecord, RecordFault } from "./bills/fuel-records.ts";
 // Faults of a fuel record, line by line.
 export { recordFaults } from "./bills/fuel-records.ts";

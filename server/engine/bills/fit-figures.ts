@@ -61,3 +61,25 @@ export function fitsBills(figures: FitFigures, step: keyof typeof fitLimits = "m
   const limits = fitLimits[step];
   return Math.abs(figures.nmbePercent) <= limits.nmbePercent && figures.cvRmsePercent <= limits.cvRmsePercent;
 }
+
+/**
+ * Readings that are off by more than a share of their bill, worst first. A year can pass while one month is 40 % off.
+ *
+ * Units of the bills, share 0.05 to 2. Bills below a twentieth of the mean are left out: shares of next to nothing say nothing.
+ * Errors EngineInputError. Source [GUIDELINE14].
+ */
+export function readingsOff(
+  figures: FitFigures,
+  billed: readonly number[],
+  shareFrac = 0.4,
+): { index: number; offFrac: number }[] {
+  requireInRange("shareFrac", shareFrac, 0.05, 2);
+  requireInRange("billed", billed.length, figures.readings, figures.readings);
+  const mean = billed.reduce((sum, bill) => sum + bill, 0) / billed.length;
+  return figures.residuals
+    .map((residual, index) => ({ index, bill: billed[index] ?? 0, residual }))
+    .filter(({ bill }) => bill >= mean / 20)
+    .map(({ index, bill, residual }) => ({ index, offFrac: residual / bill }))
+    .filter(({ offFrac }) => Math.abs(offFrac) > shareFrac)
+    .sort((a, b) => Math.abs(b.offFrac) - Math.abs(a.offFrac));
+}

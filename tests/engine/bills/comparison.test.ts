@@ -6,7 +6,7 @@ import {
   fitDegreeDays,
   leastProvableSavingFrac,
 } from "../../../server/engine/bills/degree-day-fit.ts";
-import { fitFigures, fitsBills } from "../../../server/engine/bills/fit-figures.ts";
+import { fitFigures, fitsBills, readingsOff } from "../../../server/engine/bills/fit-figures.ts";
 import { likelyCauses, unexplained } from "../../../server/engine/bills/likely-causes.ts";
 import { EngineInputError } from "../../../server/engine/errors.ts";
 import type { FuelProperties } from "../../../server/engine/fuel/fuel-properties.ts";
@@ -49,6 +49,16 @@ describe("how well a model follows bills", () => {
     expect(figures.residuals).toEqual([20, 10]);
     expect(fitsBills(figures)).toBe(false);
     expect(() => fitFigures([100, 100], [80])).toThrow(/There are 2 bills/);
+  });
+});
+
+describe("single months", () => {
+  it("are named where they are far off though the year fits", () => {
+    const billed = [820, 700, 560, 330, 120, 40, 1, 25, 110, 310, 540, 760];
+    const modelled = [820, 700, 560, 330, 200, 40, 9, 25, 110, 310, 540, 760];
+    const figures = fitFigures(billed, modelled);
+    expect(fitsBills(figures)).toBe(true);
+    expect(readingsOff(figures, billed)).toEqual([{ index: 4, offFrac: expect.closeTo(-2 / 3, 9) }]);
   });
 });
 

@@ -15,7 +15,7 @@ import type { FuelProperties } from "../../../server/engine/fuel/fuel-properties
 import { amountOf, energyOf, fuelUnits, unitsOf } from "../../../server/engine/fuel/fuel-units.ts";
 import { periodCost, savingValue, type Tariff } from "../../../server/engine/fuel/tariff.ts";
 import { litresAt15C, standardGasM3 } from "../../../server/engine/fuel/volume-correction.ts";
-import { wetBasisMoisture, woodValue } from "../../../server/engine/fuel/wood.ts";
+import { wetBasisMoisture, woodFuel, woodValue } from "../../../server/engine/fuel/wood.ts";
 
 const propane: FuelProperties = {
   id: "lpg",
@@ -165,5 +165,9 @@ describe("volumes and wood", () => {
       }),
     );
     expect(wetBasisMoisture(1)).toBe(0.5);
+    // 2.9 MWh net in a tonne of chips of 40 % moisture is the figure of the trade.
+    const wood = woodFuel("chips", 0.4, 250);
+    expect(netFromGross(energyOf(1, "t", wood), wood.netOverGrossFrac) / 1000).toBeCloseTo(2.9, 1);
+    expect(energyOf(1, "looseM3", wood)).toBeCloseTo(energyOf(250, "kg", wood), 9);
   });
 });
