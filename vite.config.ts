@@ -18,6 +18,7 @@ export default defineConfig({
           name: "unit",
           include: ["tests/engine/**/*.test.ts", "tests/unit/**/*.test.ts", "tests/validation/**/*.test.ts"],
           environment: "node",
+          setupFiles: ["tests/support/property-seed.ts"],
         },
       },
       {

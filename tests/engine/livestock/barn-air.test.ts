@@ -56,7 +56,7 @@ describe("fans", () => {
 
   it("run on a clock for a mean flow, and back", () => {
     fc.assert(
-      fc.property(flow, fc.double({ min: 1, max: 300, noNaN: true }), (full, run) => {
+      fc.property(flow, fc.double({ min: 1, max: 299, noNaN: true }), (full, run) => {
         fc.pre(full > 1);
         expect(timerRunS(timerFlowM3H(full, run, 300), full, 300)).toBeCloseTo(run, 6);
       }),
