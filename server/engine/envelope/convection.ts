@@ -1,4 +1,5 @@
 import { requireInRange } from "../errors.ts";
+import { airLayerLaw, insideLaw } from "./convection-laws.ts";
 
 export const outsideModels = [
   "watmuff",
@@ -40,28 +41,19 @@ export function outsideConvectionWM2K(windMS: number, model: OutsideModel = "wat
   return outside[model](windMS);
 }
 
-/** Added inside the root, so that the slope of the law stays finite when both sides are equally warm, K. */
-const SMALL_K = 1e-6;
-
 /**
  * Natural convection at the inside of a surface: warm air under a cold roof stirs, warm air over a cold floor does not.
  *
  * @param differenceK air minus surface, K
  * @param tiltDeg of the outside: 0 flat roof or ceiling, 90 wall
- * Units → W/(m² K). Valid difference −100 to 100 K, tilt 0 to 180°. Errors EngineInputError. Source [TARP-1983].
+ * Units → W/(m² K). Valid difference −150 to 150 K, tilt 0 to 180°. Errors EngineInputError. Source [TARP-1983].
  */
 export function insideConvectionWM2K(differenceK: number, tiltDeg: number): number {
   requireInRange("differenceK", differenceK, -150, 150, "K");
   requireInRange("tiltDeg", tiltDeg, 0, 180, "°");
-  return insideCoefficient(differenceK, Math.cos((tiltDeg * Math.PI) / 180));
-}
-
-/** As {@link insideConvectionWM2K} without checks, for the solver's inner loop; takes the cosine of the tilt. */
-export function insideCoefficient(differenceK: number, cosTilt: number): number {
-  const stirs = differenceK * cosTilt >= 0;
-  const steep = Math.abs(cosTilt);
-  const factor = stirs ? 9.482 / (7.283 - steep) : 1.81 / (1.382 + steep);
-  return factor * Math.cbrt(Math.abs(differenceK) + SMALL_K);
+  const law = { coefficient: 0, slope: 0, branch: 0 };
+  insideLaw(law, differenceK, Math.cos((tiltDeg * Math.PI) / 180));
+  return law.coefficient;
 }
 
 /**
@@ -74,17 +66,8 @@ export function insideCoefficient(differenceK: number, cosTilt: number): number 
 export function airLayerConvectionWM2K(thicknessM: number, differenceK: number, tiltDeg: number): number {
   requireInRange("thicknessM", thicknessM, 0.0005, 2, "m");
   requireInRange("tiltDeg", tiltDeg, 0, 180, "°");
-  return airLayerCoefficient(thicknessM, differenceK, Math.cos((tiltDeg * Math.PI) / 180));
-}
-
-/** As {@link airLayerConvectionWM2K} without checks. Below 5 K the standard's fixed values equal the law at 5 K. */
-export function airLayerCoefficient(thicknessM: number, differenceK: number, cosTilt: number): number {
-  const root = Math.cbrt(Math.max(5, Math.abs(differenceK)));
-  const upright = 0.73 * root;
-  const flat =
-    differenceK * cosTilt >= 0
-      ? 1.14 * root
-      : 0.09 * Math.max(5, Math.abs(differenceK)) ** 0.187 * thicknessM ** -0.44;
-  const steep = Math.abs(cosTilt);
-  return Math.max(steep * flat + (1 - steep) * upright, 0.025 / thicknessM);
+  const law = { coefficient: 0, slope: 0, branch: 0 };
+  const cosTilt = Math.cos((tiltDeg * Math.PI) / 180);
+  airLayerLaw(law, differenceK, cosTilt, 0.025 / thicknessM, 0.09 * thicknessM ** -0.44);
+  return law.coefficient;
 }
