@@ -25,7 +25,7 @@ export function FarmScreen() {
   const own = (buildings.data ?? []).filter((building) => building.farmId === farmId);
   const hidden = farm.data.buildingCount - own.length;
   return (
-    <div className="mx-auto grid w-full max-w-[1180px] gap-x-12 gap-y-8 px-4 py-6 md:grid-cols-[3fr_2fr] md:px-8">
+    <div className="mx-auto grid w-full max-w-[1180px] content-start items-start gap-x-12 gap-y-8 px-4 py-6 md:grid-cols-[3fr_2fr] md:px-8">
       <div className="flex flex-wrap items-start justify-between gap-3 md:col-span-2">
         <div>
           <h1 className="m-0 font-sign text-2xl font-extrabold">{farm.data.name}</h1>
