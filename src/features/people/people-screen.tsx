@@ -102,7 +102,7 @@ export function PeopleScreen() {
     },
   ];
   return (
-    <div className="mx-auto grid w-full max-w-[1280px] gap-x-12 gap-y-8 px-4 py-6 md:px-8 lg:grid-cols-[minmax(0,5fr)_minmax(280px,2fr)]">
+    <div className="mx-auto grid w-full max-w-[1280px] content-start items-start gap-x-12 gap-y-8 px-4 py-6 md:px-8 lg:grid-cols-[minmax(0,5fr)_minmax(280px,2fr)]">
       <div className="flex flex-wrap items-center justify-between gap-3 lg:col-span-2">
         <h1 className="m-0 font-sign text-2xl font-extrabold">
           {counted(people.data.length, "person", "people")}
