@@ -101,6 +101,8 @@ function refuseInProduction(values: z.infer<typeof environmentSchema>): void {
     problems.push("MAIL_FAKE_URL: the mail stand-in cannot be used in production");
   if (!values.PUBLIC_URL.startsWith("https://"))
     problems.push("PUBLIC_URL: must start with https:// in production");
+  if (values.TRUST_PROXY === 0)
+    problems.push("TRUST_PROXY: must count the proxies that bring https, at least 1 in production");
   if (values.DB_PASSWORD.length < 12)
     problems.push("DB_PASSWORD: must have at least 12 characters in production");
   if (problems.length > 0) throw new ConfigError(problems);

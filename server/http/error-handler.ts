@@ -18,6 +18,10 @@ function known(error: unknown): AppError | null {
   if ((error as { code?: string }).code === "EBADCSRFTOKEN") {
     return new AppError("bad_csrf", 403, "This page is out of date. Please load it again.");
   }
+  const { status } = error as { status?: number };
+  if (status === 404) return new AppError("not_found", 404, "That address does not exist.");
+  if (status !== undefined && status >= 400 && status < 500)
+    return new AppError("bad_json", status, "The request could not be read.");
   if (error instanceof URIError) return new AppError("not_found", 404, "That address does not exist.");
   return null;
 }

@@ -42,6 +42,11 @@ export async function createFarm({
   authorize(actor, cooperativePolicy, "addFarm", cooperative, "That co-operative");
   if (farmerEmail !== null && farmerName === null)
     throw invalid({ farmerName: "The farmer's name is missing." });
+  if (farmerEmail?.toLowerCase() === actor.email) {
+    throw invalid({
+      farmerEmail: "The farmer must be somebody else: who advises a farm does not answer for it.",
+    });
+  }
   const farm = await Farm.create({ ...rest, ...position }, { transaction });
   await FarmPerson.create({ farmId: farm.id, personId: actor.personId, role: "advisor" }, { transaction });
   if (farmerEmail !== null && farmerName !== null) {

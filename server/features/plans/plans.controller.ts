@@ -99,6 +99,7 @@ export async function readPlan({ input, actor, transaction }: Call<typeof planRe
 export async function sendPlan({ input, actor, transaction, mailer, config }: Call<typeof sendPlanRequest>) {
   const loaded = await loadPlan(input.params.id, "send", actor, transaction);
   const { plan, building, farm } = loaded;
+  await plan.reload({ lock: true, transaction });
   if (plan.status !== "draft") throw conflict("This plan was sent before.");
   if (isOutdated(plan, building)) {
     throw conflict(
@@ -190,6 +191,7 @@ export async function writeMessage({
 }: Call<typeof writeMessageRequest>) {
   const loaded = await loadPlan(input.params.id, "write", actor, transaction);
   const { plan, building, farm } = loaded;
+  await plan.reload({ lock: true, transaction });
   if (plan.status === "draft") throw conflict("Send the plan first.");
   const role = worksAs(actor, farm.id, "advisor") ? "advisor" : "farmer";
   await addMessage(plan, actor.personId, role, input.body.message, null, transaction);

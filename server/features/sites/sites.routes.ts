@@ -26,7 +26,7 @@ async function listSites({ input, actor, transaction }: Call<typeof sitesRequest
   const buildings = await Building.findAll({ where: { farmId: farms.map((farm) => farm.id) }, transaction });
   const [surveys, plans, links, stations] = await Promise.all([
     loadSurveys(buildings, transaction),
-    latestPlans(buildings, () => true, transaction),
+    latestPlans(buildings, () => false, transaction),
     FarmPerson.findAll({ where: { farmId: farms.map((farm) => farm.id) }, transaction }),
     ClimateStation.findAll({ attributes: ["id", "country"], transaction }),
   ]);

@@ -46,7 +46,7 @@ describe("configuration", () => {
   });
 
   it("refuses both stand-ins, plain http and weak passwords in production", () => {
-    const production = { NODE_ENV: "production" };
+    const production = { NODE_ENV: "production", TRUST_PROXY: "1" };
     expect(problems(production)).toBe("");
     expect(problems({ ...production, GOOGLE_FAKE_URL: "http://127.0.0.1:1" })).toContain(
       "sign-in stand-in cannot be used",
@@ -57,6 +57,7 @@ describe("configuration", () => {
     expect(problems({ ...production, PUBLIC_URL: "http://heat.example.org" })).toContain(
       "must start with https://",
     );
+    expect(problems({ ...production, TRUST_PROXY: "0" })).toContain("must count the proxies");
     expect(problems({ ...production, DB_PASSWORD: "short" })).toContain("at least 12 characters");
   });
 });
